@@ -68,6 +68,8 @@ export interface LineAnswer {
   readonly gramsExact: number | null
   /** What is weighed; everything downstream belongs to this. */
   readonly grams: number | null
+  /** Mass of the article on the shelf where it is not the pure substance (phosphoric acid 85 %). */
+  readonly articleGrams: number | null
   /** For liquids measured by volume. */
   readonly millilitres: number | null
   readonly millimoles: number | null
@@ -83,26 +85,29 @@ export interface LineAnswer {
 
 export interface SolutionAnswer {
   readonly osmolality: Interval
-  readonly osmolality25: number
-  readonly osmolality37: number
-  readonly osmolarityMilliosmPerL: number
+  /* Null where only the electrolyte model could tell and it refused. */
+  readonly osmolality25: number | null
+  readonly osmolality37: number | null
+  readonly osmolarityMilliosmPerL: number | null
   readonly effectiveOsmolality: Interval
   readonly freezingPointDepressionK: number
   /** By the trade's convention 0.52 K = 0.9 % NaCl. */
   readonly conventionalDepressionK: number | null
-  readonly sodiumChlorideEquivalentPercent: number
-  readonly osmoticCoefficient: number
-  readonly waterActivity: number
-  readonly osmoticPressureKPa37: number
+  /** Null beyond the strongest sodium chloride solution. */
+  readonly sodiumChlorideEquivalentPercent: number | null
+  /** Null for pure water too. */
+  readonly osmoticCoefficient: number | null
+  readonly waterActivity: number | null
+  readonly osmoticPressureKPa37: number | null
   readonly labelOsmolarityMilliosmPerL: number | null
-  readonly ionicStrength: number
+  readonly ionicStrength: number | null
   readonly pH: number | null
   readonly pH5: number | null
   readonly pH25: number | null
   readonly pH37: number | null
   readonly pHIsSolved: boolean
-  readonly densityGPerMl: number
-  readonly waterKgPerL: number
+  readonly densityGPerMl: number | null
+  readonly waterKgPerL: number | null
   /** Red-cell volume relative to plasma, and haemolysis onset; null when outside the relation's range. */
   readonly redCellRelativeVolume: number | null
 }

@@ -3,7 +3,8 @@ export type Confidence = 'high' | 'medium' | 'low'
 /** Key into data/sources.json. */
 export type SourceKey = string
 
-export interface Datum<T = number> {
+/** One figure of one source. */
+export interface SingleDatum<T = number> {
   readonly value: T
   readonly unit: string
   readonly kind: DatumKind
@@ -14,6 +15,12 @@ export interface Datum<T = number> {
   /** Standard uncertainty in the unit of the value. */
   readonly uncertainty?: number
   readonly note?: string
+}
+
+/** The chosen figure; `note` says why it was chosen where sources differ. */
+export interface Datum<T = number> extends SingleDatum<T> {
+  /** What other sources say about the same quantity, agreeing or not, kept as found. */
+  readonly alternatives?: readonly SingleDatum<T>[]
 }
 
 export interface Source {
@@ -49,6 +56,21 @@ export interface TabulatedEquivalent {
   readonly e: Datum
 }
 
+export interface MeasuredOsmolality {
+  /** % w/v of the ingredient alone in water. */
+  readonly atPercent: number
+  /** mOsm/kg. */
+  readonly osmolality: Datum
+}
+
+/** The liquid on the shelf where it is not the pure substance, e.g. phosphoric acid 85 % w/w. */
+export interface Article {
+  /** Mass fraction of the named substance. */
+  readonly massFraction: Datum
+  /** g/mL of the article. */
+  readonly density: Datum
+}
+
 /** One ionisation step of the ingredient's own drug ion, most acidic first. */
 export interface OwnIonisation {
   readonly pKa: Datum
@@ -77,8 +99,18 @@ export interface Ingredient {
   /** Ions and molecules that one formula unit gives in water, as labelled (before speciation). Absent: unknown. */
   readonly releases?: readonly ReleasedSpecies[]
   readonly electrolyteClass?: ElectrolyteClass
+  /** Which of `releases` the steps of `ownIonisation` belong to. */
+  readonly ionisingSpecies?: string
   readonly ownIonisation?: readonly OwnIonisation[]
+  /**
+   * Moles of water one formula unit gives to the solution, where dissolving takes up or sets free water
+   * (borax 3, not 10; sodium metabisulfite -1). Absent: `crystalWaters`.
+   */
+  readonly waterReleased?: number
   readonly sodiumChlorideEquivalents: readonly TabulatedEquivalent[]
+  /** % w/v that is iso-osmotic with 0.9 % sodium chloride. */
+  readonly isoOsmoticPercent?: Datum
+  readonly measuredOsmolality?: readonly MeasuredOsmolality[]
   /** K for a 1 % w/v solution. */
   readonly freezingPointDepression1Percent?: Datum
   /** Measured van 't Hoff factor. */
@@ -89,14 +121,16 @@ export interface Ingredient {
   readonly haemolysisPercent?: Datum
   /** mL per g. */
   readonly displacement?: Datum
-  /** g/mL of the liquid. */
+  /** g/mL of the pure liquid. */
   readonly density?: Datum
-  /** Mass fraction of the named substance in the article on the shelf (85 % w/w phosphoric acid: 0.85). Absent: 1. */
+  readonly article?: Article
   readonly usualStrength?: string
   readonly routeNotes?: string
   readonly handling?: string
   /** Other forms of the same active part: hydrates, salts, base. */
   readonly family?: string
+  /** What could not be given and why, and traps of this ingredient's data. */
+  readonly notes?: readonly string[]
 }
 
 export interface SpeciesRecord {
@@ -107,6 +141,8 @@ export interface SpeciesRecord {
   readonly component: string
   /** How many of the component one species holds (B3O3(OH)4-: 3 boron). */
   readonly count: number
+  /** A complex draws on further balances: CaCitrate- holds one "citrate" and, here, one "Ca+2". */
+  readonly partners?: readonly { readonly component: string; readonly count: number }[]
   /** g/mol. */
   readonly molarMass: number
   /** cm³/mol, conventional (V°(H+) = 0), 25 °C. */

@@ -28,4 +28,5 @@ export interface Refusal {
   readonly wayOut: string
 }
 
-export type Read<T> = { readonly ok: true; readonly value: T } | { readonly ok: false; readonly refusal: Refusal }
+export type Read<T> =
+  { readonly ok: true; readonly value: T } | { readonly ok: false; readonly refusal: Refusal }

@@ -1,0 +1,70 @@
+import type { SheetSection } from '../../worksheet/types.ts'
+import { CautionList } from './CautionList.tsx'
+import { SheetTable } from './SheetTable.tsx'
+
+/** One section of the sheet, by its kind. */
+export function Section({ section }: { readonly section: SheetSection }) {
+  return (
+    <section className={`paper-section paper-${section.kind}`}>
+      <h4>{section.heading}</h4>
+      <Body section={section} />
+    </section>
+  )
+}
+
+function Body({ section }: { readonly section: SheetSection }) {
+  switch (section.kind) {
+    case 'fields':
+      return <Fields fields={section.fields} />
+    case 'table':
+      return <SheetTable table={section} />
+    case 'steps':
+      return <Steps steps={section.steps} />
+    case 'cautions':
+      return <CautionList cautions={section.cautions} />
+    case 'arithmetic':
+      return <Lines lines={section.lines} />
+    case 'text':
+      return section.paragraphs.map((paragraph) => <p key={paragraph}>{paragraph}</p>)
+  }
+}
+
+type Of<Kind extends SheetSection['kind']> = Extract<SheetSection, { kind: Kind }>
+
+const Fields = ({ fields }: Pick<Of<'fields'>, 'fields'>) => (
+  <dl className="paper-fields">
+    {fields.map(({ label, value }) => (
+      <div key={label}>
+        <dt>{label}</dt>
+        {value === null ? (
+          <dd className="paper-blank" aria-label="blank, to be filled in by hand" />
+        ) : (
+          <dd>{value}</dd>
+        )}
+      </div>
+    ))}
+  </dl>
+)
+
+const Steps = ({ steps }: Pick<Of<'steps'>, 'steps'>) => (
+  <ol className="paper-steps">
+    {steps.map(({ text, reason }) => (
+      <li key={text}>
+        <span className="paper-tick" aria-hidden="true" />
+        <span>
+          {text} <small>{reason}</small>
+        </span>
+        <span className="paper-initials">time, initials</span>
+      </li>
+    ))}
+  </ol>
+)
+
+/* The same line may stand twice: two ingredients with the same figures. */
+const Lines = ({ lines }: Pick<Of<'arithmetic'>, 'lines'>) => (
+  <ul className="paper-lines">
+    {lines.map((line, index) => (
+      <li key={`${index} ${line}`}>{line}</li>
+    ))}
+  </ul>
+)

@@ -1,0 +1,62 @@
+import type { Evaluation, Finding, Severity } from '../../evaluation/types.ts'
+import type { Library } from '../../library/library.ts'
+import { tellFinding } from '../../worksheet/tell.ts'
+import { cellId } from './cells.ts'
+import { viewOf } from './memo.ts'
+import { currentEvaluation } from './store.ts'
+
+export interface FindingView {
+  readonly key: string
+  readonly code: string
+  readonly severity: Severity
+  readonly word: string
+  readonly message: string
+  readonly wayOut: string
+  readonly source: string
+  readonly evidence: string
+  readonly fromMemory: boolean
+  readonly blocks: boolean
+  readonly lineKeys: readonly string[]
+  /** The reason in writing with which a person went past it. */
+  readonly accepted: string | null
+}
+
+const words: Readonly<Record<Severity, string>> = { stop: 'Stop', warn: 'Warn', note: 'Note' }
+
+export const findingViews = viewOf(
+  (state) => [currentEvaluation(state), state.library, state.typing] as const,
+  (evaluation, library, typing): readonly FindingView[] =>
+    (evaluation?.findings ?? [])
+      .filter((finding) => !isUnderTheHand(finding, typing))
+      .map((finding, index) => viewOfFinding(finding, index, evaluation, library)),
+)
+
+/** An amount that is just being written blocks, but is not held against the writer before the hand has left. */
+const isUnderTheHand = ({ blocks, lineKeys }: Finding, typing: string | null) =>
+  blocks && lineKeys.some((key) => cellId({ kind: 'amount', key }) === typing)
+
+function viewOfFinding(
+  finding: Finding,
+  index: number,
+  evaluation: Evaluation | null,
+  library: Library,
+): FindingView {
+  const { message, wayOut } = tellFinding(finding, library)
+  const source = library.sources.get(finding.source)
+  return {
+    key: `${finding.code} ${finding.lineKeys.join(' ')} ${index}`,
+    code: finding.code,
+    severity: finding.severity,
+    word: words[finding.severity],
+    message,
+    wayOut,
+    source: source?.title ?? finding.source,
+    evidence: finding.evidence ?? '',
+    fromMemory: source?.kind === 'from-memory',
+    blocks: finding.blocks,
+    lineKeys: finding.lineKeys,
+    accepted:
+      evaluation?.formula.acknowledgements?.find((accepted) => accepted.code === finding.code)?.reason ??
+      null,
+  }
+}

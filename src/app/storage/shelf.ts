@@ -1,0 +1,51 @@
+import { createStore, get, set, type UseStore } from 'idb-keyval'
+
+/** What is kept of the sheet on the desk: the document as text and whatever could not be taken from its cells. */
+export interface KeptSheet {
+  readonly document: string
+  readonly drafts: Readonly<Record<string, string>>
+  readonly paper: string
+  /** Names this very state, so that another window's work is recognised. */
+  readonly stamp: string
+}
+
+export interface Shelf {
+  read(): Promise<KeptSheet | undefined>
+  write(sheet: KeptSheet): Promise<void>
+  /** Puts a sheet that this version cannot read where it is not written over. */
+  setAside(sheet: KeptSheet): Promise<void>
+}
+
+const key = 'sheet on the desk'
+const asideKey = 'sheet set aside'
+
+/** Keeps the sheet in this browser's own database. The database is opened at first use, so a refusal is an answer. */
+export function browserShelf(): Shelf {
+  let store: UseStore | undefined
+  const opened = () => (store ??= createStore('evenwater', 'sheets'))
+  return {
+    read: async () => keptSheet(await get<unknown>(key, opened())),
+    write: async (sheet) => set(key, sheet, opened()),
+    setAside: async (sheet) => set(asideKey, sheet, opened()),
+  }
+}
+
+function keptSheet(value: unknown): KeptSheet | undefined {
+  if (typeof value !== 'object' || value === null) return undefined
+  const { document, drafts, paper, stamp } = value as Partial<Record<keyof KeptSheet, unknown>>
+  if (typeof document !== 'string' || typeof stamp !== 'string' || typeof paper !== 'string') return undefined
+  if (typeof drafts !== 'object' || drafts === null) return undefined
+  const texts = Object.entries(drafts).filter(
+    (entry): entry is [string, string] => typeof entry[1] === 'string',
+  )
+  return { document, drafts: Object.fromEntries(texts), paper, stamp }
+}
+
+/** The plain sentence for a storage that refused. */
+export function refusalSentence(error: unknown): string {
+  const name = error instanceof Error || error instanceof DOMException ? error.name : ''
+  if (name === 'QuotaExceededError') {
+    return 'The storage of this browser is full: this sheet stays on the screen but is not kept when the page closes. Save it as a file.'
+  }
+  return 'This browser does not let the page keep anything: this sheet stays on the screen but is gone when the page closes. Save it as a file.'
+}

@@ -1,0 +1,79 @@
+import type { Interval } from '../../quantity/interval.ts'
+import type { SolutionState, ThermalState, UncertaintyPart } from '../../chemistry/types.ts'
+import type { Plan } from '../adjusting/plan.ts'
+import { effectiveReadingOf, readingOf, type Portion } from '../model.ts'
+import type { SolutionAnswer } from '../types.ts'
+import { labelOsmolarity } from './electrolytes.ts'
+import { combined, intervalAround } from './interval.ts'
+import { pHAt } from './pHAt.ts'
+
+/** The solved solution in the trade's quantities. */
+export function solutionAnswer(
+  state: SolutionState,
+  portions: readonly Portion[],
+  parts: readonly UncertaintyPart[],
+  plan: Plan,
+): SolutionAnswer {
+  const { conventions, scale, setting } = plan
+  const reading = readingOf(state, conventions)
+  const standardUncertainty = combined(parts)
+  const { '5': at5, '25': at25, '37': at37 } = state.states
+  const percent = scale.percentOf(reading)
+  return {
+    osmolality: intervalAround(reading, standardUncertainty),
+    osmolality25: at25.osmolalityOsmPerKg * 1000,
+    osmolality37: at37.osmolalityOsmPerKg * 1000,
+    osmolarityMilliosmPerL: reading * state.waterKgPerLitre,
+    effectiveOsmolality: effectiveInterval(state, reading, standardUncertainty, plan),
+    freezingPointDepressionK: (reading / 1000) * conventions.cryoscopicConstant.value,
+    conventionalDepressionK: percent === null ? null : conventionalDepression(percent, plan),
+    sodiumChlorideEquivalentPercent: percent,
+    osmoticCoefficient: state.shares.length === 0 ? null : at25.osmoticCoefficient,
+    waterActivity: at25.waterActivity,
+    osmoticPressureKPa37: osmoticPressure(at37, plan),
+    labelOsmolarityMilliosmPerL: labelOsmolarity(portions, setting.volumeMl).milliosmPerL,
+    ionicStrength: at25.ionicStrength,
+    pH: typeof setting.pH === 'number' ? setting.pH : pHAt(setting.temperatureCelsius, state),
+    pH5: at5.pH,
+    pH25: at25.pH,
+    pH37: at37.pH,
+    pHIsSolved: state.pHSolved,
+    densityGPerMl: state.densityGPerMl,
+    waterKgPerL: state.waterKgPerLitre,
+    redCellRelativeVolume: null,
+  }
+}
+
+/** 0.9 % sodium chloride = 0.52 K, in proportion. */
+export const conventionalDepression = (sodiumChloridePercent: number, { conventions }: Plan): number =>
+  (sodiumChloridePercent / conventions.isotonicSodiumChloridePercent.value) *
+  conventions.isotonicDepressionKelvin.value
+
+/** Π = O·ρ(water)·R·T, kPa. */
+function osmoticPressure({ osmolalityOsmPerKg, celsius }: ThermalState, { conventions }: Plan): number {
+  const { waterDensity37, gasConstant } = conventions
+  return osmolalityOsmPerKg * waterDensity37.value * gasConstant.value * (celsius + 273.15)
+}
+
+/**
+ * The part outside red cells, with what the reflection coefficients leave open: their standard uncertainties, and
+ * the whole share of a solute whose coefficient nobody knows at the low end.
+ */
+function effectiveInterval(
+  state: SolutionState,
+  reading: number,
+  standardUncertainty: number,
+  plan: Plan,
+): Interval {
+  const value = effectiveReadingOf(state, plan.conventions)
+  const scale = reading / state.states.freezing.osmolalityOsmPerKg
+  let variance = reading > 0 ? ((standardUncertainty * value) / reading) ** 2 : 0
+  let unknown = 0
+  for (const { reflection, osmolalityOsmPerKg } of state.shares) {
+    const share = osmolalityOsmPerKg * scale
+    if (reflection === null) unknown += share
+    else variance += (share * (reflection.uncertainty ?? 0)) ** 2
+  }
+  const interval = intervalAround(value, Math.sqrt(variance))
+  return { ...interval, low: interval.low - unknown }
+}

@@ -1,0 +1,34 @@
+import conventions from '../../data/parameters/conventions.json'
+import binary from '../../data/parameters/pitzer/binary.json'
+import mixing from '../../data/parameters/pitzer/mixing.json'
+import neutral from '../../data/parameters/pitzer/neutral.json'
+import steps from '../../data/steps/steps.json'
+import volumetric from '../../data/devices/volumetric.json'
+import { curveFiles } from './curves.ts'
+import { equilibriaFiles, speciesFiles } from './equilibria.ts'
+import { findingFiles } from './findings.ts'
+import { atomicWeightFiles } from './formula-mass.ts'
+import { ingredientFiles } from './ingredients.ts'
+import { sourceFiles } from './sources.ts'
+
+const folders: Readonly<Record<string, Readonly<Record<string, unknown>>>> = {
+  devices: { volumetric },
+  equilibria: equilibriaFiles,
+  findings: findingFiles,
+  ingredients: ingredientFiles,
+  parameters: { conventions },
+  'parameters/curves': curveFiles,
+  'parameters/pitzer': { binary, mixing, neutral },
+  sources: sourceFiles,
+  species: { ...speciesFiles, ...atomicWeightFiles },
+  steps: { steps },
+}
+
+/** What every data file says, by the path of the file below data/, without its ending. */
+export function libraryContent(): Readonly<Record<string, unknown>> {
+  return Object.fromEntries(
+    Object.entries(folders).flatMap(([folder, files]) =>
+      Object.entries(files).map(([file, content]) => [`${folder}/${file}`, content]),
+    ),
+  )
+}

@@ -1,0 +1,46 @@
+import { sentence } from './say.ts'
+import { tellFinding } from './tell.ts'
+import type { Library } from '../library/library.ts'
+import type { Evaluation, Finding, Severity } from '../evaluation/types.ts'
+import type { SheetCaution, SheetSection } from './types.ts'
+
+const order: Readonly<Record<Severity, number>> = { stop: 0, warn: 1, note: 2 }
+
+/** Everything to watch, stops first, each with what to do and where it comes from. */
+export function attentionSection(evaluation: Evaluation, library: Library): SheetSection {
+  const cautions = evaluation.findings
+    .toSorted((first, second) => order[first.severity] - order[second.severity])
+    .map((finding) => told(finding, evaluation, library))
+  return { kind: 'cautions', heading: 'What to watch', cautions }
+}
+
+function told(finding: Finding, evaluation: Evaluation, library: Library): SheetCaution {
+  const { message, wayOut } = tellFinding(finding, library)
+  return {
+    severity: finding.severity,
+    code: finding.code,
+    text: sentence(message),
+    wayOut: sentence(wayOut),
+    source: sourceOf(finding, library),
+    acceptedBecause: acceptance(finding, evaluation),
+  }
+}
+
+function sourceOf(finding: Finding, library: Library): string {
+  const source = library.sources.get(finding.source)
+  const title = source?.title ?? finding.source
+  return finding.evidence ? `${title}; evidence: ${finding.evidence}` : title
+}
+
+const acceptance = (finding: Finding, { formula }: Evaluation): string | null =>
+  formula.acknowledgements?.find(({ code }) => code === finding.code)?.reason ?? null
+
+/** Why the sheet may not be printed: blocked, or a stop that nobody accepted in writing. */
+export function shutReasons(evaluation: Evaluation, library: Library): readonly string[] {
+  const open = evaluation.findings.filter(
+    (finding) => finding.blocks || (finding.severity === 'stop' && acceptance(finding, evaluation) === null),
+  )
+  const reasons = open.map((finding) => sentence(tellFinding(finding, library).message))
+  if (evaluation.status === 'blocked' && reasons.length === 0) return ['The formula is blocked.']
+  return [...new Set(reasons)]
+}
