@@ -2,6 +2,7 @@ import { loadConventions } from '../library/conventions.ts'
 import type { NeutralCurve } from '../library/curves.ts'
 import { loadEstimates } from '../library/estimates.ts'
 import { debyeHueckelSlope } from './activity/debye-hueckel.ts'
+import { osmolalityAtOwnFreezing } from './activity/freezing.ts'
 import { kgPerMolWater } from './activity/model.ts'
 import { sodiumChlorideOsmolality } from './activity/sodium-chloride.ts'
 import { mix, type Mixture } from './mixture/thermal.ts'
@@ -78,7 +79,10 @@ export function solveSolution(
   if (condition.status === 'failed') return refused([failureProblem(condition.failure, work)])
   const solved = new Map<Temperature, Solved>()
   for (const temperature of options.temperatures ?? everyTemperature) {
-    const outcome = solveAt(celsiusOf[temperature], condition.totals, work)
+    const outcome =
+      temperature === 'freezing'
+        ? solveFreezing(condition.totals, work)
+        : solveAt(celsiusOf[temperature], condition.totals, work)
     if ('status' in outcome) return refused([failureProblem(outcome, work)])
     solved.set(temperature, outcome)
   }
@@ -156,6 +160,30 @@ function solveAt(
   const mixture = mix(solutes, speciated, work.totals.outsidePool, system, celsius)
   if (mixture) return { mixture, system }
   return { status: 'not-converged', code: 'mixture-not-converged', values: { celsius } }
+}
+
+/** A second temperature below zero, for solutions that freeze well below. */
+const belowZero = -5
+
+/**
+ * The state at the solution's own freezing point. Near physiological strength that is 0 °C to within the model; from
+ * 0.5 osmol/kg on, the osmolality is carried on linearly from 0 and −5 °C to where ice is in equilibrium. A solution
+ * that freezes deeper than the ice relation reaches keeps its state at 0 °C and has no reading.
+ */
+function solveFreezing(totals: Readonly<Record<string, number>>, work: Work): Solved | SpeciationFailure {
+  const atZero = solveAt(celsiusOf.freezing, totals, work)
+  if ('status' in atZero) return atZero
+  const { osmolalityOsmPerKg: zero } = atZero.mixture
+  const weight = Math.min(1, Math.max(0, (zero - 0.5) / 0.3))
+  if (weight === 0) return atZero
+  const below = solveAt(belowZero, totals, work)
+  if ('status' in below) return below
+  const slope = ((below.mixture.osmolalityOsmPerKg - zero) / belowZero) * weight
+  const osmolality = osmolalityAtOwnFreezing(zero, slope)
+  if (osmolality === null)
+    return { status: 'not-converged', code: 'freezes-too-deep', values: { osmolality: zero } }
+  const { kelvin, osmolalityOsmPerKg } = osmolality
+  return { ...atZero, mixture: { ...atZero.mixture, osmolalityOsmPerKg, celsius: -kelvin } }
 }
 
 /** The ions of an implied adjuster may be new to the contents. */

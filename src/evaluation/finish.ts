@@ -1,7 +1,7 @@
 import type { Formula } from '../formula/types.ts'
 import type { SolutionState } from '../chemistry/types.ts'
 import type { Plan } from './adjusting/plan.ts'
-import { methodTarget, countsEffective } from './adjusting/target.ts'
+import { countsEffective, methodTarget, targetReading } from './adjusting/target.ts'
 import { preparationParts } from './answers/interval.ts'
 import { bareLine, withShares } from './answers/lines.ts'
 import { solutionAnswer } from './answers/solution.ts'
@@ -11,7 +11,7 @@ import { additiveAnswer, additiveMethods, type MethodInput } from './methods/ans
 import { electrolyteAnswer } from './methods/electrolyte.ts'
 import type { MethodSizing } from './methods/adjust.ts'
 import { portionsOf, quick, readingOf, solve, type Portion } from './model.ts'
-import type { Evaluation, Finding, LineAnswer } from './types.ts'
+import type { AdjusterAnswer, Evaluation, Finding, LineAnswer } from './types.ts'
 
 /** From the solved solution to the whole answer, headline by the electrolyte model. */
 export function finish(
@@ -36,7 +36,7 @@ export function finish(
   const solution = solutionAnswer(state, portions, parts, plan)
   const input = methodInput(lines, portions, plan)
   const additive = additiveMethods.map((method) => additiveAnswer(method, input))
-  const volume = isotonicVolumeOfSolutes(portions, reading, plan)
+  const volume = isotonicVolumeOfSolutes(portions, reading, standing.adjuster, plan)
   const methods = [
     ...additive.map(({ answer }) => answer),
     electrolyteAnswer(solution, state, lines, volume, plan),
@@ -95,17 +95,31 @@ export function methodSizing(portions: readonly Portion[], plan: Plan): MethodSi
 }
 
 /** Volume in which the solutes without the adjuster count for 0.9 % sodium chloride, by their water activity. mL. */
-function isotonicVolumeOfSolutes(portions: readonly Portion[], reading: number, plan: Plan): number | null {
-  const { conventions, scale, setting, library } = plan
-  const keys = new Set(plan.adjusters.map(({ key }) => key))
-  const fixed = portions.filter(({ key }) => !keys.has(key))
-  let ofFixed = reading
-  if (fixed.length < portions.length) {
-    const result = solve(fixed, setting, library, quick)
-    if (result.status === 'refused') return null
-    ofFixed = readingOf(result.state, conventions)
-  }
-  const percent = scale.percentOf(ofFixed)
+function isotonicVolumeOfSolutes(
+  portions: readonly Portion[],
+  reading: number,
+  adjuster: AdjusterAnswer | null,
+  plan: Plan,
+): number | null {
+  const { conventions, scale, setting } = plan
+  const ofSolutes = adjuster ? readingWithout(portions, adjuster, plan) : reading
+  const percent = ofSolutes === null ? null : scale.percentOf(ofSolutes)
   if (percent === null) return null
   return (setting.volumeMl * percent) / conventions.isotonicSodiumChloridePercent.value
+}
+
+/** Reading of the solutes alone: known from the sizing, unless that counted what stays outside cells alone. */
+function readingWithout(
+  portions: readonly Portion[],
+  { without }: AdjusterAnswer,
+  plan: Plan,
+): number | null {
+  const { target, adjusters, setting, library, conventions, scale } = plan
+  if (target && !countsEffective(target)) {
+    return without === null ? null : targetReading({ ...target, value: without }, scale, conventions)
+  }
+  const keys = new Set(adjusters.map(({ key }) => key))
+  const fixed = portions.filter(({ key }) => !keys.has(key))
+  const result = solve(fixed, setting, library, quick)
+  return result.status === 'refused' ? null : readingOf(result.state, conventions)
 }

@@ -6,17 +6,20 @@ import steps from '../../data/steps/steps.json'
 import volumetric from '../../data/devices/volumetric.json'
 import { curveFiles } from './curves.ts'
 import { equilibriaFiles, speciesFiles } from './equilibria.ts'
+import { estimateFiles } from './estimates.ts'
 import { findingFiles } from './findings.ts'
 import { atomicWeightFiles } from './formula-mass.ts'
 import { ingredientFiles } from './ingredients.ts'
 import { sourceFiles } from './sources.ts'
+import { vehicleFiles } from './vehicles.ts'
 
 const folders: Readonly<Record<string, Readonly<Record<string, unknown>>>> = {
+  buffers: vehicleFiles,
   devices: { volumetric },
   equilibria: equilibriaFiles,
   findings: findingFiles,
   ingredients: ingredientFiles,
-  parameters: { conventions },
+  parameters: { conventions, ...estimateFiles },
   'parameters/curves': curveFiles,
   'parameters/pitzer': { binary, mixing, neutral },
   sources: sourceFiles,

@@ -19,6 +19,9 @@ const binary = v.strictObject({
   relativeUncertainty: v.number(),
   source: v.string(),
   temperatureSource: v.optional(v.string()),
+  fromMemory: v.optional(v.boolean()),
+  /** Measurements it was fitted to: never a check of it. */
+  fittedOn: v.optional(v.string()),
   note: v.optional(v.string()),
 })
 export type BinaryRow = v.InferOutput<typeof binary>

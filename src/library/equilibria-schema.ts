@@ -55,6 +55,7 @@ export const equilibriaSchemas = {
     ligands: v.array(filledText),
     interaction: pairs,
     negligible: pairs,
+    unknown: pairs,
   }),
   assumptions: v.strictObject({
     protonatedBaseEnthalpyKilojoulePerMole: figure,

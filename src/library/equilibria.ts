@@ -48,13 +48,14 @@ export interface MetalLigand {
 /**
  * How the bond of a metal with a ligand is carried. A pair with a formation is a species; a pair in
  * `interaction` has it in the interaction parameters instead, never both; a pair in `negligible` is too weak
- * to matter. Any other pair of the two lists is not known.
+ * to matter. Any other pair of the two lists is not known, nor is any in `unknown` (polyols with borate).
  */
 export interface Representation {
   readonly metals: readonly string[]
   readonly ligands: readonly string[]
   readonly interaction: readonly MetalLigand[]
   readonly negligible: readonly MetalLigand[]
+  readonly unknown: readonly MetalLigand[]
 }
 
 export interface Equilibria {

@@ -3,11 +3,13 @@ import { libraryContent } from './content.ts'
 import { type NeutralCurve, loadCurves } from './curves.ts'
 import { type ElectrolyteParameters, loadElectrolytes } from './electrolytes.ts'
 import { type Equilibria, loadEquilibria, loadSpecies } from './equilibria.ts'
+import { type Estimates, loadEstimates } from './estimates.ts'
 import { type FindingText, loadFindings } from './findings.ts'
 import { loadIngredients } from './ingredients.ts'
 import { loadSources } from './sources.ts'
 import { loadSteps, type StepRule } from './steps.ts'
 import type { Ingredient, Source, SpeciesRecord } from './types.ts'
+import { loadVehicles, type PublishedVehicle } from './vehicles.ts'
 
 /** The read-only view of everything under data/. */
 export interface Library {
@@ -20,7 +22,11 @@ export interface Library {
   readonly equilibria: Equilibria
   /** Osmotic curves of neutral solutes by species id. */
   readonly curves: ReadonlyMap<string, NeutralCurve>
+  /** What is assumed where nothing was measured. */
+  readonly estimates: Estimates
   readonly findings: ReadonlyMap<string, FindingText>
+  /** Published buffers made to a volume. */
+  readonly vehicles: readonly PublishedVehicle[]
   /** Rules of the order of mixing. */
   readonly steps: readonly StepRule[]
 }
@@ -42,8 +48,10 @@ function assemble(): Library {
     electrolytes: loadElectrolytes(),
     equilibria: loadEquilibria(),
     curves: loadCurves(),
+    estimates: loadEstimates(),
     findings: keyed(loadFindings(), ({ code }) => code),
     steps: loadSteps(),
+    vehicles: loadVehicles(),
   }
 }
 

@@ -1,6 +1,7 @@
 import conventions from '../../data/sources/conventions.json'
 import curves from '../../data/sources/curves.json'
 import devices from '../../data/sources/devices.json'
+import electrolytes from '../../data/sources/electrolytes.json'
 import equilibria from '../../data/sources/equilibria.json'
 import general from '../../data/sources/general.json'
 import ingredients from '../../data/sources/ingredients.json'
@@ -12,6 +13,7 @@ export const sourceFiles: Readonly<Record<string, unknown>> = {
   conventions,
   curves,
   devices,
+  electrolytes,
   equilibria,
   general,
   ingredients,

@@ -68,7 +68,7 @@ describe('sizeTo', () => {
       status: 'read',
       milliosmPerKg: read(size),
     })
-  const base = { wanted: 290, guess: 0.1, largest: 100 }
+  const base = { wanted: 290, guess: () => 0.1, largest: 100 }
 
   it('finds the size on a curved reading', () => {
     const sized = sizeTo({ ...base, trial: from((x) => 100 + 300 * x - 20 * x * x) })
@@ -98,7 +98,19 @@ describe('sizeTo', () => {
       x > 0.2 && x < 0.9
         ? { status: 'refused', code: 'hole' }
         : { status: 'read', milliosmPerKg: x < 0.5 ? 100 + x : 400 }
-    expect(sizeTo({ ...base, guess: 1, trial: broken }).status).toBe('not-converged')
+    expect(sizeTo({ ...base, guess: () => 1, trial: broken }).status).toBe('not-converged')
+  })
+
+  it('walks on below a size that the model refuses', () => {
+    const upTo =
+      (limit: number) =>
+      (x: number): Trial =>
+        x > limit ? { status: 'refused', code: 'no-room' } : { status: 'read', milliosmPerKg: 100 + 300 * x }
+    expect(sizeTo({ ...base, guess: () => 5, trial: upTo(0.7) })).toMatchObject({ status: 'found' })
+    const short = sizeTo({ ...base, guess: () => 5, trial: upTo(0.5) })
+    if (short.status !== 'unreachable') throw new Error(short.status)
+    expect(short.size).toBeGreaterThan(0.499)
+    expect(short.highest).toBeLessThanOrEqual(250)
   })
 
   it('keeps to the largest size', () => {

@@ -30,7 +30,9 @@ describe('words of the evaluation room', () => {
     ].map(([, code = '']) => code)
     expect(raised.length).toBeGreaterThan(35)
     const internal = new Set(['missing-for-adjuster'])
-    expect([...new Set(raised)].filter((code) => !internal.has(code) && !library.findings.has(code))).toEqual([])
+    expect([...new Set(raised)].filter((code) => !internal.has(code) && !library.findings.has(code))).toEqual(
+      [],
+    )
   })
 
   it('are all raised somewhere', () => {

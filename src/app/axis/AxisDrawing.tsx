@@ -62,35 +62,40 @@ export function Shares({ content, layout }: DrawingProps) {
   )
 }
 
-export function ShareLabels({ content, layout }: DrawingProps) {
-  const { scale, barTop, barHeight } = layout
+const leaderRow = 17
+
+/** Leader lines under all texts, so that none is crossed out. */
+function Leaders({ content, layout }: DrawingProps) {
+  const { scale, barTop } = layout
+  return layout.labels.map(({ key, row }) => {
+    const segment = content.shares.find((share) => share.key === key)
+    if (!segment || row === 0) return null
+    const foot = (scale.place(segment.from) + scale.place(segment.to)) / 2
+    return (
+      <path key={key} d={`M${foot} ${barTop}V${barTop - 3 - (row - 1) * leaderRow}`} className="leader" />
+    )
+  })
+}
+
+export function ShareLabels(drawing: DrawingProps) {
+  const { content, layout } = drawing
+  const { barTop, barHeight } = layout
   return (
     <g>
+      <Leaders {...drawing} />
       {layout.labels.map(({ key, text, x, row }) => {
-        const segment = content.shares.find((share) => share.key === key)
-        if (!segment) return null
-        if (row === 0) {
-          return (
-            <text
-              key={key}
-              x={x}
-              y={barTop + barHeight / 2 + 4.5}
-              textAnchor="middle"
-              className={`share-label ${weaveText(segment.order)}`}
-            >
-              {text}
-            </text>
-          )
-        }
-        const base = barTop - 6 - (row - 1) * 17
-        const foot = (scale.place(segment.from) + scale.place(segment.to)) / 2
+        const order = content.shares.find((share) => share.key === key)?.order ?? 0
+        const inside = row === 0
         return (
-          <g key={key}>
-            <path d={`M${foot} ${barTop}V${base + 3}`} className="leader" />
-            <text x={x} y={base} textAnchor="middle" className="share-label halo">
-              {text}
-            </text>
-          </g>
+          <text
+            key={key}
+            x={x}
+            y={inside ? barTop + barHeight / 2 + 4.5 : barTop - 6 - (row - 1) * leaderRow}
+            textAnchor="middle"
+            className={`share-label ${inside ? weaveText(order) : 'halo'}`}
+          >
+            {text}
+          </text>
         )
       })}
     </g>

@@ -1,44 +1,48 @@
-import type { Severity } from '../../evaluation/types.ts'
 import { usePage } from '../state/context.tsx'
-import { findingViews, type FindingView } from '../state/findingViews.ts'
+import { findingGroups, type FindingGroup, type FindingView } from '../state/findingViews.ts'
 import { Acknowledgement } from './Acknowledgement.tsx'
 import { SeverityMark } from './SeverityMark.tsx'
 import './findings.css'
 
-const severities: readonly Severity[] = ['stop', 'warn', 'note']
-
-/** What to watch: everything that was found, the gravest first. */
+/** What to watch: everything that was found, the gravest first, one kind together. */
 export function Findings() {
-  const views = usePage(findingViews)
-  if (views.length === 0)
-    return <p className="soft">Nothing was found in this formula that a rule here knows of.</p>
+  const groups = usePage(findingGroups)
+  if (groups.length === 0) return <p className="soft">No rule kept here speaks to this formula.</p>
   return (
     <ul className="findings">
-      {severities.flatMap((severity) =>
-        views
-          .filter((view) => view.severity === severity)
-          .map((view) => <FindingItem key={view.key} view={view} />),
-      )}
+      {groups.map((group) => (
+        <FindingItem key={`${group.first.severity} ${group.first.code}`} group={group} />
+      ))}
     </ul>
   )
 }
 
-function FindingItem({ view }: { readonly view: FindingView }) {
+function FindingItem({ group: { first, told } }: { readonly group: FindingGroup }) {
   return (
-    <li className={`finding finding-${view.severity}`}>
+    <li className={`finding finding-${first.severity}`}>
       <span className="finding-word">
-        <SeverityMark severity={view.severity} /> {view.word}
+        <SeverityMark severity={first.severity} /> {first.word}
       </span>
       <div className="finding-body">
-        <p>{view.message}</p>
-        {view.wayOut !== '' && <p className="way-out">{view.wayOut}</p>}
-        <p className="small soft">
-          {view.source}
-          {view.evidence !== '' && `; ${view.evidence}`}
-          {view.fromMemory && <em>, from memory</em>}
-        </p>
-        {view.severity === 'stop' && !view.blocks && <Acknowledgement view={view} />}
+        {told.map(({ key, message, wayOut }, index) => (
+          <p key={key}>
+            {message} {wayOut !== '' && <span className="way-out">{wayOut}</span>}{' '}
+            {index === told.length - 1 && <Standing of={first} />}
+          </p>
+        ))}
+        {first.severity === 'stop' && !first.blocks && <Acknowledgement view={first} />}
       </div>
     </li>
+  )
+}
+
+/** By whose word, and how well founded. */
+function Standing({ of: { source, evidence, fromMemory } }: { readonly of: FindingView }) {
+  return (
+    <span className="small soft">
+      {source}
+      {evidence !== '' && `; ${evidence}`}
+      {fromMemory && <em>, from memory</em>}
+    </span>
   )
 }

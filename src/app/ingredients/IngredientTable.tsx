@@ -35,6 +35,11 @@ export function IngredientTable() {
         onDoubleClick={grid.onDoubleClick}
         onPaste={paste}
       >
+        <colgroup>
+          {columns.map((column) => (
+            <col key={column} className={`column-${column}`} />
+          ))}
+        </colgroup>
         <Head volume={volume} />
         <tbody role="rowgroup">
           {views.map((view) => (
@@ -52,8 +57,10 @@ export function IngredientTable() {
   )
 }
 
+const columns = ['name', 'amount', 'weigh', 'mmol', 'particles', 'share', 'osmolality', 'remove']
+
 function Head({ volume }: { readonly volume: string }) {
-  const columns = [
+  const titles = [
     'ingredient',
     'as ordered',
     `weigh for ${volume.replace(' ', '\u00A0')}`,
@@ -65,9 +72,9 @@ function Head({ volume }: { readonly volume: string }) {
   return (
     <thead role="rowgroup">
       <tr role="row">
-        {columns.map((column, index) => (
-          <th key={column} role="columnheader" scope="col" className={index > 1 ? 'figure-head' : undefined}>
-            {column}
+        {titles.map((title, index) => (
+          <th key={title} role="columnheader" scope="col" className={index > 1 ? 'figure-head' : undefined}>
+            {title}
           </th>
         ))}
         <th role="columnheader" scope="col">

@@ -5,8 +5,8 @@ import type { Page, PageState } from './store.ts'
 
 const PageContext = createContext<Page | null>(null)
 
-export function PageProvider({ store, children }: { readonly store: Page; readonly children: ReactNode }) {
-  return <PageContext.Provider value={store}>{children}</PageContext.Provider>
+export function PageProvider({ page, children }: { readonly page: Page; readonly children: ReactNode }) {
+  return <PageContext.Provider value={page}>{children}</PageContext.Provider>
 }
 
 function useOwnPage(): Page {

@@ -50,7 +50,7 @@ function viewOfFinding(
     word: words[finding.severity],
     message,
     wayOut,
-    source: source?.title ?? finding.source,
+    source: source?.kind === 'project' ? 'Worked out here.' : (source?.title ?? finding.source),
     evidence: finding.evidence ?? '',
     fromMemory: source?.kind === 'from-memory',
     blocks: finding.blocks,
@@ -60,3 +60,25 @@ function viewOfFinding(
       null,
   }
 }
+
+/** Findings of one kind told together. */
+export interface FindingGroup {
+  readonly first: FindingView
+  readonly told: readonly { readonly key: string; readonly message: string; readonly wayOut: string }[]
+}
+
+const gravity: readonly Severity[] = ['stop', 'warn', 'note']
+
+export const findingGroups = viewOf(
+  (state) => [findingViews(state)] as const,
+  (views): readonly FindingGroup[] => {
+    const byCode = new Map<string, readonly FindingView[]>()
+    for (const view of views) {
+      const kind = `${view.severity} ${view.code}`
+      byCode.set(kind, [...(byCode.get(kind) ?? []), view])
+    }
+    return [...byCode.values()]
+      .flatMap((told) => (told[0] ? [{ first: told[0], told }] : []))
+      .toSorted((one, other) => gravity.indexOf(one.first.severity) - gravity.indexOf(other.first.severity))
+  },
+)

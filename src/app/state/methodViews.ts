@@ -1,6 +1,8 @@
 import type { Evaluation, MethodAnswer, MethodId } from '../../evaluation/types.ts'
 import { methodIds } from '../../evaluation/types.ts'
-import { exactMass, significant, wholeNumber } from '../words/figures.ts'
+import type { Library } from '../../library/library.ts'
+import { tellCode } from '../../worksheet/tell.ts'
+import { comparedMass, significant, wholeNumber } from '../words/figures.ts'
 import { viewOf } from './memo.ts'
 import { currentEvaluation } from './store.ts'
 import { traceViews, type TraceView } from './traceViews.ts'
@@ -37,11 +39,11 @@ const names: Readonly<Record<MethodId, string>> = {
 const order: readonly MethodId[] = ['electrolyte', ...methodIds.filter((id) => id !== 'electrolyte')]
 
 export const methodViews = viewOf(
-  (state) => [currentEvaluation(state)] as const,
-  (evaluation): MethodsView => {
+  (state) => [currentEvaluation(state), state.library] as const,
+  (evaluation, library): MethodsView => {
     const adjusters = (evaluation?.lines ?? []).filter((line) => line.isAdjuster)
     const sizing = adjusters.length > 0
-    const methods = order.map((id) => methodView(id, evaluation, sizing))
+    const methods = order.map((id) => methodView(id, evaluation, sizing, library))
     const values = methods.flatMap(({ value }) => (value === null ? [] : [value]))
     const [low, high] = padded(values)
     const what = adjusters.map((line) => line.ingredient.name.toLowerCase()).join(' and ')
@@ -64,27 +66,36 @@ function padded(values: readonly number[]): readonly [number, number] {
   return [Math.max(0, low - room), high + room]
 }
 
-function methodView(id: MethodId, evaluation: Evaluation | null, sizing: boolean): MethodView {
+function methodView(
+  id: MethodId,
+  evaluation: Evaluation | null,
+  sizing: boolean,
+  library: Library,
+): MethodView {
   const answer = evaluation?.methods.find((method) => method.method === id)
   const value = (sizing ? answer?.adjusterGrams : answer?.osmolalityMilliosmPerKg) ?? null
-  const write = sizing ? exactMass : (milliosm: number) => `${wholeNumber(milliosm)} mOsm/kg`
+  const write = sizing ? comparedMass : (milliosm: number) => `${wholeNumber(milliosm)} mOsm/kg`
   return {
     id,
     name: names[id],
     isHeadline: evaluation?.headline === id,
     value,
     text: value === null ? 'no answer' : write(value),
-    why: answer ? whySentence(answer, evaluation) : '',
-    missing: [],
+    why: answer ? whySentence(answer, evaluation, library) : '',
+    missing: (answer?.missing ?? []).map(({ code, key }) =>
+      tellCode(code, library, { ingredient: nameOf(key, evaluation) }),
+    ),
     steps: traceViews(answer?.trace ?? []),
   }
 }
 
-function whySentence({ differsBy }: MethodAnswer, evaluation: Evaluation | null): string {
+const nameOf = (key: string, evaluation: Evaluation | null): string =>
+  evaluation?.lines.find((line) => line.key === key)?.ingredient.name ?? 'the adjuster'
+
+function whySentence({ differsBy }: MethodAnswer, evaluation: Evaluation | null, library: Library): string {
   if (!differsBy) return ''
-  const line = evaluation?.lines.find((candidate) => candidate.key === differsBy.key)
-  const name = line?.ingredient.name ?? differsBy.key
   const more = differsBy.milliosmPerKg > 0 ? 'more' : 'less'
   const size = significant(Math.abs(differsBy.milliosmPerKg), 2)
-  return `Most of the difference from the headline is ${name}: ${size} mOsm/kg ${more} here. ${differsBy.reason}`
+  const name = nameOf(differsBy.key, evaluation)
+  return `Differs from the headline most in ${name}, by ${size} mOsm/kg ${more}. ${tellCode(differsBy.reason, library)}`
 }

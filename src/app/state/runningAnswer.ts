@@ -10,13 +10,15 @@ export interface RunningAnswer {
   readonly watch: string
 }
 
+const words = { stop: 'stop', warn: 'warning', note: 'note' } as const
+
 /** The answer in one line, for the masthead. */
 export const runningAnswer = viewOf(
   (state) => [currentEvaluation(state), findingViews(state)] as const,
   (evaluation, findings): RunningAnswer => {
     const counted = (['stop', 'warn', 'note'] as const).flatMap((severity) => {
       const count = findings.filter((finding) => finding.severity === severity).length
-      return count === 0 ? [] : [`${count} ${severity}`]
+      return count === 0 ? [] : [`${count} ${words[severity]}${count === 1 ? '' : 's'}`]
     })
     const watch = joined(counted)
     const solution = evaluation?.solution

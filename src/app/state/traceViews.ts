@@ -10,7 +10,7 @@ export interface TraceView {
 }
 
 const written = ({ value, unit }: Figure) =>
-  value === null ? 'unknown' : `${significant(value, 5)} ${unit}`.trim()
+  value === null ? 'unknown' : `${significant(value, 5)} ${unit === '1' ? '' : unit}`.trim()
 
 export const traceViews = (steps: readonly TraceStep[]): readonly TraceView[] =>
   steps.map((step, index) => ({

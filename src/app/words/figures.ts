@@ -10,5 +10,7 @@ export const volumeToMeasure = (millilitres: number) => expressVolume(millilitre
 
 /** A mass as the balance shows it: it is rounded already, so every digit of it is written. */
 export const massToWeigh = (grams: number) => expressMass(grams, { significant: 9 })
+/** A mass by a method, to compare. */
+export const comparedMass = (grams: number) => expressMass(grams, { significant: 4 })
 /** A mass that was not rounded to any balance. */
 export const exactMass = (grams: number) => expressMass(grams, { significant: 5 })

@@ -11,10 +11,10 @@ const meltingKelvin = 273.15
 const waterKgPerMol = 0.0180153
 
 /** Deepest depression for which the relation is used, K. */
-export const deepestDepression = 15
+export const deepestDepression = 40
 
 /**
- * Osmolality of the solution that freezes that much below pure water, osmol per kg. 0 to 15 K.
+ * Osmolality of the solution that freezes that much below pure water, osmol per kg. 0 to 40 K.
  * @example osmolalityAtDepression(1.86) → 1.0012
  */
 export function osmolalityAtDepression(kelvin: number): number {
@@ -26,7 +26,7 @@ export function osmolalityAtDepression(kelvin: number): number {
 }
 
 /**
- * Freezing-point depression of a solution of that osmolality at its freezing point, K. Not a number beyond 15 K, where
+ * Freezing-point depression of a solution of that osmolality at its freezing point, K. Not a number beyond 40 K, where
  * the relation is not used.
  * @example freezingDepression(1) → 1.8578
  */
@@ -37,4 +37,25 @@ export function freezingDepression(osmolalityOsmPerKg: number): number {
     kelvin -= (osmolalityAtDepression(kelvin) - osmolalityOsmPerKg) / slope
   }
   return kelvin <= deepestDepression ? kelvin : Number.NaN
+}
+
+/** Below −10 °C the parameters of the solutes are not carried on any further, K. */
+const coldestOfParameters = 10
+
+/**
+ * Where a solution whose osmolality is `zero + slope·t` below 0 °C meets ice: its depression and its osmolality there.
+ * Null beyond the depth at which the relation is used.
+ * @example osmolalityAtOwnFreezing(1, 0) → { kelvin: 1.8578, osmolalityOsmPerKg: 1 }
+ */
+export function osmolalityAtOwnFreezing(
+  zero: number,
+  slopePerKelvin: number,
+): { readonly kelvin: number; readonly osmolalityOsmPerKg: number } | null {
+  let osmolalityOsmPerKg = zero
+  let kelvin = freezingDepression(osmolalityOsmPerKg)
+  for (let round = 0; round < 12; round += 1) {
+    osmolalityOsmPerKg = zero - slopePerKelvin * Math.min(kelvin, coldestOfParameters)
+    kelvin = freezingDepression(osmolalityOsmPerKg)
+  }
+  return Number.isFinite(kelvin) ? { kelvin, osmolalityOsmPerKg } : null
 }

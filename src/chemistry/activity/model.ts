@@ -1,23 +1,29 @@
-import type { SpeciesRecord } from '../../library/types.ts'
 import type { ElectrolyteParameters } from '../../library/electrolytes.ts'
-import { compile, type Compiled } from './compiled.ts'
-import { debyeHueckelSlope } from './debye-hueckel.ts'
-import { mixingIntegral } from './electrostatic.ts'
-import { mixtureUncertainty, pairRemarks, type PairRemark } from './uncertainty.ts'
 import { loadEstimates } from '../../library/estimates.ts'
+import type { SpeciesRecord } from '../../library/types.ts'
+import { compile } from './compiled.ts'
+import { debyeHueckelSlope } from './debye-hueckel.ts'
+import { flatten, type Flat } from './flat.ts'
+import { lnActivityCoefficients } from './ln-gamma.ts'
+import { unlikeCharges } from './mixing.ts'
+import { mixtureUncertainty, pairRemarks, type PairRemark } from './uncertainty.ts'
 
 export interface Osmotic {
-  osmoticCoefficient: number
-  sumOfMolalities: number
-  waterActivity: number
-  osmolalityOsmPerKg: number
+  readonly osmoticCoefficient: number
+  readonly sumOfMolalities: number
+  readonly waterActivity: number
+  /** osmol per kg: −ln(a_w) / 0.0180153. */
+  readonly osmolalityOsmPerKg: number
 }
 
+/** Activities of one set of species at one temperature. Molalities are in the order of `species`. */
 export interface ActivityModel {
   readonly species: readonly SpeciesRecord[]
   readonly celsius: number
   ionicStrength(m: Float64Array): number
   osmotic(m: Float64Array): Osmotic
+  osmolality(m: Float64Array): number
+  /** ln γ of each species, on the model's own single-ion scale. */
   lnGamma(m: Float64Array, out: Float64Array): void
   readonly missingPairs: readonly (readonly [string, string])[]
   /** Standard uncertainty of φ, relative. */
@@ -25,97 +31,69 @@ export interface ActivityModel {
   remarks(m: Float64Array): readonly PairRemark[]
 }
 
-const b = 1.2
+/** What the loops write to; one for each model, so a model serves one solve at a time. */
+export interface Workspace {
+  readonly exponentials: Float64Array
+  readonly theta: Float64Array
+  readonly change: Float64Array
+}
+
+/** Pitzer's b, kg^½ mol^-½. */
+export const pitzerB = 1.2
 export const kgPerMolWater = 0.0180153
 
+/**
+ * Pitzer ion interaction for any number of ions and molecules: β0, β1, β2, Cφ, θ, ψ, λ, ζ and unsymmetrical mixing. A
+ * pair without parameters has the Debye–Hückel term alone and is named in `missingPairs`. Sources stand with the data.
+ */
 export function compileActivityModel(
   species: readonly SpeciesRecord[],
   parameters: ElectrolyteParameters,
   celsius: number,
 ): ActivityModel {
   const compiled = compile(species, parameters, celsius)
+  const flat = flatten(compiled)
   const slope = debyeHueckelSlope(celsius)
-  const work = new Float64Array(4)
-  const id = (at: number) => species[at]?.id ?? ''
+  const work: Workspace = {
+    exponentials: new Float64Array(flat.alphas.length),
+    theta: new Float64Array(flat.mixings.length / 2),
+    change: new Float64Array(flat.mixings.length / 2),
+  }
+  const ids = species.map(({ id }) => id)
   return {
     species,
     celsius,
-    ionicStrength: (m) => strength(m, compiled.charges),
-    osmotic: (m) => osmotic(m, compiled, slope, work),
-    lnGamma: (m, out) => lnGamma(m, out, compiled, slope, work),
+    ionicStrength: (m) => strengthOf(m, flat.charges),
+    osmolality: (m) => sumOf(m) + 2 * excess(m, flat, slope, work),
+    osmotic: (m) => osmotic(sumOf(m), excess(m, flat, slope, work)),
+    lnGamma: (m, out) => lnActivityCoefficients(m, out, flat, slope, work),
     relativeUncertainty: (m) => mixtureUncertainty(m, compiled, celsius, loadEstimates()),
-    remarks: (m) =>
-      pairRemarks(
-        m,
-        compiled,
-        species.map(({ id: name }) => name),
-      ),
-    missingPairs: compiled.missing.map(([cation, anion]) => [id(cation), id(anion)] as const),
+    remarks: (m) => pairRemarks(m, compiled, ids),
+    missingPairs: compiled.missing.map(([cation, anion]) => [ids[cation] ?? '', ids[anion] ?? ''] as const),
   }
 }
 
-function strength(m: Float64Array, z: Float64Array): number {
+export function strengthOf(m: Float64Array, charges: Float64Array): number {
   let sum = 0
-  for (let at = 0; at < m.length; at += 1) sum += m[at]! * z[at]! * z[at]!
+  for (let at = 0; at < m.length; at += 1) sum += m[at]! * charges[at]! * charges[at]!
   return sum / 2
 }
 
-function charges(m: Float64Array, z: Float64Array): number {
+/** Σ m·|z|. */
+export function equivalentsOf(m: Float64Array, magnitudes: Float64Array): number {
   let sum = 0
-  for (let at = 0; at < m.length; at += 1) sum += m[at]! * Math.abs(z[at]!)
+  for (let at = 0; at < m.length; at += 1) sum += m[at]! * magnitudes[at]!
   return sum
 }
 
-/** E-θ and I·E-θ′ into work[0], work[1]. */
-function electrostatic(z: readonly [number, number], ionic: number, slope: number, work: Float64Array): void {
-  const x = 6 * slope * Math.sqrt(ionic)
-  const [p, q] = z
-  mixingIntegral(x * p * q, work)
-  let value = work[0]!
-  let change = x * p * q * work[1]!
-  mixingIntegral(x * p * p, work)
-  value -= work[0]! / 2
-  change -= (x * p * p * work[1]!) / 2
-  mixingIntegral(x * q * q, work)
-  value -= work[0]! / 2
-  change -= (x * q * q * work[1]!) / 2
-  const theta = ((p * q) / (4 * ionic)) * value
-  work[0] = theta
-  work[1] = -theta + ((p * q) / (8 * ionic)) * change
-}
-
-function osmotic(m: Float64Array, model: Compiled, slope: number, work: Float64Array): Osmotic {
-  const ionic = strength(m, model.charges)
-  const root = Math.sqrt(ionic)
-  const z = charges(m, model.charges)
+function sumOf(m: Float64Array): number {
   let sum = 0
   for (let at = 0; at < m.length; at += 1) sum += m[at]!
-  let excess = (-slope * ionic * root) / (1 + b * root)
-  for (const pair of model.pairs) {
-    const product = m[pair.cation]! * m[pair.anion]!
-    if (product === 0) continue
-    let beta = pair.beta0 + pair.beta1 * Math.exp(-pair.alpha1 * root)
-    if (pair.beta2 !== 0) beta += pair.beta2 * Math.exp(-pair.alpha2 * root)
-    excess += product * (beta + z * pair.c)
-  }
-  for (const like of model.likes) {
-    const product = m[like.first]! * m[like.second]!
-    if (product === 0) continue
-    let term = like.theta
-    if (like.charges) {
-      electrostatic(like.charges, ionic, slope, work)
-      term += work[0]! + work[1]!
-    }
-    for (const [third, psi] of like.psi) term += m[third]! * psi
-    excess += product * term
-  }
-  for (const { neutral, other, lambda } of model.neutrals) {
-    excess += m[neutral]! * m[other]! * lambda * (neutral === other ? 0.5 : 1)
-  }
-  for (const { neutral, cation, anion, zeta } of model.triples) {
-    excess += m[neutral]! * m[cation]! * m[anion]! * zeta
-  }
-  const osmolality = sum + 2 * excess
+  return sum
+}
+
+function osmotic(sum: number, half: number): Osmotic {
+  const osmolality = sum + 2 * half
   return {
     osmoticCoefficient: sum === 0 ? 1 : osmolality / sum,
     sumOfMolalities: sum,
@@ -124,84 +102,58 @@ function osmotic(m: Float64Array, model: Compiled, slope: number, work: Float64A
   }
 }
 
-const g = (x: number) => (x < 1e-5 ? 1 - (2 * x) / 3 : (2 * (1 - (1 + x) * Math.exp(-x))) / (x * x))
-const gSlope = (x: number) =>
-  x < 1e-5 ? -x / 3 : (-2 * (1 - (1 + x + (x * x) / 2) * Math.exp(-x))) / (x * x)
-
-function lnGamma(
-  m: Float64Array,
-  out: Float64Array,
-  model: Compiled,
-  slope: number,
-  work: Float64Array,
-): void {
-  const ionic = strength(m, model.charges)
-  out.fill(0)
+/** (φ − 1)·Σm / 2. */
+function excess(m: Float64Array, flat: Flat, slope: number, work: Workspace): number {
+  const ionic = strengthOf(m, flat.charges)
   const root = Math.sqrt(ionic)
-  const z = charges(m, model.charges)
-  let f = -slope * (root / (1 + b * root) + (2 / b) * Math.log1p(b * root))
-  let c = 0
-  for (const pair of model.pairs) {
-    const [i, j] = [pair.cation, pair.anion]
-    const x1 = pair.alpha1 * root
-    let beta = pair.beta0 + pair.beta1 * g(x1)
-    let change = ionic > 0 ? (pair.beta1 * gSlope(x1)) / ionic : 0
-    if (pair.beta2 !== 0) {
-      const x2 = pair.alpha2 * root
-      beta += pair.beta2 * g(x2)
-      if (ionic > 0) change += (pair.beta2 * gSlope(x2)) / ionic
-    }
-    const product = m[i]! * m[j]!
-    f += product * change
-    c += product * pair.c
-    out[i]! += m[j]! * (2 * beta + z * pair.c)
-    out[j]! += m[i]! * (2 * beta + z * pair.c)
-  }
-  f += likeTerms(m, out, model, ionic, slope, work)
-  neutralTerms(m, out, model)
-  for (let at = 0; at < m.length; at += 1) {
-    const charge = model.charges[at]!
-    out[at]! += charge * charge * f + Math.abs(charge) * c
-  }
+  const { exponentials } = work
+  for (let at = 0; at < exponentials.length; at += 1) exponentials[at] = Math.exp(-flat.alphas[at]! * root)
+  unlikeCharges(flat.mixings, ionic, slope, work.theta, work.change)
+  const limiting = (-slope * ionic * root) / (1 + pitzerB * root)
+  return limiting + pairExcess(m, flat, exponentials) + likeExcess(m, flat, work) + moleculeExcess(m, flat)
 }
 
-function likeTerms(
+function pairExcess(m: Float64Array, { pairs, magnitudes }: Flat, exponentials: Float64Array): number {
+  const z = equivalentsOf(m, magnitudes)
+  let sum = 0
+  for (let at = 0; at < pairs.cation.length; at += 1) {
+    const product = m[pairs.cation[at]!]! * m[pairs.anion[at]!]!
+    if (product === 0) continue
+    const b1 = pairs.beta1[at]! * exponentials[pairs.alpha1[at]!]!
+    const b2 = pairs.beta2[at]! * exponentials[pairs.alpha2[at]!]!
+    sum += product * (pairs.beta0[at]! + b1 + b2 + z * pairs.c[at]!)
+  }
+  return sum
+}
+
+function likeExcess(
   m: Float64Array,
-  out: Float64Array,
-  model: Compiled,
-  ionic: number,
-  slope: number,
-  work: Float64Array,
+  { likes, psiThird, psiValue }: Flat,
+  { theta, change }: Workspace,
 ): number {
-  let f = 0
-  for (const like of model.likes) {
-    const [i, j] = [like.first, like.second]
-    const product = m[i]! * m[j]!
-    let theta = like.theta
-    if (like.charges && ionic > 0) {
-      electrostatic(like.charges, ionic, slope, work)
-      theta += work[0]!
-      f += (product * work[1]!) / ionic
+  let sum = 0
+  for (let at = 0; at < likes.first.length; at += 1) {
+    const product = m[likes.first[at]!]! * m[likes.second[at]!]!
+    if (product === 0) continue
+    const mixing = likes.mixing[at]!
+    let term = likes.theta[at]!
+    if (mixing >= 0) term += theta[mixing]! + change[mixing]!
+    for (let third = likes.psiStart[at]!; third < likes.psiStart[at + 1]!; third += 1) {
+      term += m[psiThird[third]!]! * psiValue[third]!
     }
-    let ternary = 0
-    for (const [third, psi] of like.psi) {
-      ternary += m[third]! * psi
-      out[third]! += product * psi
-    }
-    out[i]! += m[j]! * (2 * theta + ternary)
-    out[j]! += m[i]! * (2 * theta + ternary)
+    sum += product * term
   }
-  return f
+  return sum
 }
 
-function neutralTerms(m: Float64Array, out: Float64Array, model: Compiled): void {
-  for (const { neutral, other, lambda } of model.neutrals) {
-    out[neutral]! += 2 * m[other]! * lambda
-    if (neutral !== other) out[other]! += 2 * m[neutral]! * lambda
+function moleculeExcess(m: Float64Array, { neutrals, triples }: Flat): number {
+  let sum = 0
+  for (let at = 0; at < neutrals.neutral.length; at += 1) {
+    const [neutral, other] = [neutrals.neutral[at]!, neutrals.other[at]!]
+    sum += m[neutral]! * m[other]! * neutrals.lambda[at]! * (neutral === other ? 0.5 : 1)
   }
-  for (const { neutral, cation, anion, zeta } of model.triples) {
-    out[neutral]! += m[cation]! * m[anion]! * zeta
-    out[cation]! += m[neutral]! * m[anion]! * zeta
-    out[anion]! += m[neutral]! * m[cation]! * zeta
+  for (let at = 0; at < triples.neutral.length; at += 1) {
+    sum += m[triples.neutral[at]!]! * m[triples.cation[at]!]! * m[triples.anion[at]!]! * triples.zeta[at]!
   }
+  return sum
 }

@@ -70,17 +70,21 @@ export function poolMember(pool: Pool, { activity }: ReadySystem): Member {
   const scaled = new Float64Array(pool.molalities.length)
   const osmolalityAt = (factor: number) => {
     for (let at = 0; at < scaled.length; at += 1) scaled[at] = (pool.molalities[at] ?? 0) * factor
-    return activity.osmotic(scaled).osmolalityOsmPerKg
+    return activity.osmolality(scaled)
   }
   let factor = 1
   return {
     shareAt(osmolality) {
-      // φ varies slowly with the scale, so the fixed point is quick; the last factor is the best start.
+      // O grows nearly as a power of the scale: a secant in the logarithms settles in a few rounds.
+      let power = 1
+      let before = { ln: 0, miss: 0 }
       for (let round = 0; round < 60; round += 1) {
-        const next = (factor * osmolality) / osmolalityAt(factor)
-        const settled = Math.abs(next - factor) <= 1e-13 * next
-        factor = next
-        if (settled) return 1 / factor
+        const miss = Math.log(osmolalityAt(factor) / osmolality)
+        const ln = Math.log(factor)
+        if (round > 0 && ln !== before.ln) power = (miss - before.miss) / (ln - before.ln)
+        before = { ln, miss }
+        factor *= Math.exp(-miss / power)
+        if (Math.abs(miss) <= 1e-13) return 1 / factor
       }
       factor = 1
       return Number.NaN

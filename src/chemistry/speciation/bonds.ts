@@ -12,16 +12,19 @@ function isComplex(pair: MetalLigand, species: readonly SpeciesRecord[]): boolea
 
 /**
  * Pairs of a metal and a ligand among the components whose bond is carried neither by a complex nor by an
- * interaction parameter and is not known to be weak: their pH and particle count are not to be trusted.
+ * interaction parameter and is not known to be weak, and polyols that bind borate: their pH and particle count are not to be trusted.
  */
 export function unknownBonds(
   components: readonly string[],
   equilibria: Equilibria,
   species: readonly SpeciesRecord[],
 ): MetalLigand[] {
-  const { metals, ligands, interaction, negligible } = equilibria.representation
+  const { metals, ligands, interaction, negligible, unknown } = equilibria.representation
   const covered = [...interaction, ...negligible]
-  return components
+  const listed = unknown.filter(
+    ({ metal, ligand }) => components.includes(metal) && components.includes(ligand),
+  )
+  const unlisted = components
     .filter((component) => metals.includes(component))
     .flatMap((metal) =>
       components.filter((component) => ligands.includes(component)).map((ligand) => ({ metal, ligand })),
@@ -31,4 +34,5 @@ export function unknownBonds(
         !covered.some((known) => known.metal === pair.metal && known.ligand === pair.ligand) &&
         !isComplex(pair, species),
     )
+  return [...listed, ...unlisted]
 }

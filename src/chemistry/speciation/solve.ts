@@ -43,7 +43,7 @@ function guessActivities(network: Network, work: Workspace): void {
 }
 
 /** How the scale of the pH lies against the model's hydrogen ion activity, at the present state. */
-export function shiftOfScale(network: Network, lnGamma: Float64Array, molalities: Float64Array): number {
+function shiftOfScale(network: Network, lnGamma: Float64Array, molalities: Float64Array): number {
   if (network.pHScale === 'hydrogen-activity') return 0
   const lnChloride = lnGamma[network.layout.chloride] as number
   return scaleShift(lnChloride, ionicStrengthOf(network, molalities), network.debyeHueckelSlope)

@@ -20,38 +20,51 @@ export type Sized =
 export interface Sizing {
   /** mOsm/kg. */
   readonly wanted: number
-  /** A size expected to come near, > 0. */
-  readonly guess: number
+  /** A size expected to bring about so many mOsm/kg, > 0. */
+  readonly guess: (missingMilliosmPerKg: number) => number
   /** No size beyond it makes sense: cap or volume. */
   readonly largest: number
   readonly trial: (size: number) => Trial
 }
 
-const indifferent = 1e-9
+/* Readings this close, in parts of the wanted one, are the same. */
+const close = 1e-10
 
 /**
  * The size at which the reading meets the wanted value: bracketed from zero upwards, then a bracketed root. Every
  * way of not finding it has its own name.
  */
-export function sizeTo({ wanted, guess, largest, trial }: Sizing): Sized {
+export function sizeTo(sizing: Sizing): Sized {
+  const { wanted } = sizing
+  const trial = remembering(sizing.trial)
   const empty = trial(0)
   if (empty.status === 'refused') return { status: 'cannot-size', without: null, code: empty.code }
   const without = empty.milliosmPerKg
   if (without === wanted) return { status: 'found', size: 0, without }
   if (without > wanted) return { status: 'already-above', without }
-  const bracket = bracketFrom(without, { wanted, guess, largest, trial })
+  const bracket = bracketFrom(without, { ...sizing, trial })
   if (bracket.status !== 'bracketed') return { ...bracket, without }
-  const found = findRoot(
-    (size) => {
-      const reading = trial(size)
-      return reading.status === 'read' ? reading.milliosmPerKg - wanted : Number.NaN
-    },
-    bracket.low,
-    bracket.high,
-    { relativeTolerance: 1e-11 },
-  )
+  const excess = (size: number) => {
+    const reading = trial(size)
+    if (reading.status === 'refused') return Number.NaN
+    const over = reading.milliosmPerKg - wanted
+    return Math.abs(over) < close * wanted ? 0 : over
+  }
+  const found = findRoot(excess, bracket.low, bracket.high, { relativeTolerance: 1e-12 })
   if (found.status !== 'converged') return { status: 'not-converged', without }
   return { status: 'found', size: found.root, without }
+}
+
+/** The bracket hands its ends on to the root: each size is solved once. */
+function remembering(trial: Sizing['trial']): Sizing['trial'] {
+  const known = new Map<number, Trial>()
+  return (size) => {
+    const earlier = known.get(size)
+    if (earlier) return earlier
+    const made = trial(size)
+    known.set(size, made)
+    return made
+  }
 }
 
 type Bracket =
@@ -59,32 +72,40 @@ type Bracket =
   | { readonly status: 'unreachable'; readonly highest: number; readonly size: number }
   | { readonly status: 'cannot-size'; readonly code: string }
 
-/** Walks up by the slope seen so far, a little too far each time, until the wanted value lies between. */
+/**
+ * Walks up by the slope seen so far, a little too far each time, until the wanted value lies between. Where the model
+ * refuses, the walk goes on in halves below that size.
+ */
 function bracketFrom(without: number, { wanted, guess, largest, trial }: Sizing): Bracket {
-  let low = 0
-  let atLow = without
-  let next = Math.min(guess, largest)
+  let [low, atLow] = [0, without]
+  let next = Math.min(guess(wanted - without), largest)
+  let refused: { readonly size: number; readonly code: string } | null = null
   for (let round = 0; round < 60; round++) {
     const reading = trial(next)
-    if (reading.status === 'refused') return beyondModel(low, atLow, reading.code)
-    const { milliosmPerKg } = reading
-    if (milliosmPerKg >= wanted) return { status: 'bracketed', low, high: next }
-    if (round === 0 && milliosmPerKg - without <= indifferent) {
-      return { status: 'cannot-size', code: 'adjuster-does-not-count' }
+    if (reading.status === 'refused') {
+      refused = { size: next, code: reading.code }
+      if (low === 0 && round > 20) return { status: 'cannot-size', code: refused.code }
+      next = (low + next) / 2
+    } else {
+      const { milliosmPerKg } = reading
+      if (milliosmPerKg >= wanted) return { status: 'bracketed', low, high: next }
+      if (low === 0 && milliosmPerKg - without <= close * wanted) {
+        return { status: 'cannot-size', code: 'adjuster-does-not-count' }
+      }
+      if (next >= largest) return { status: 'unreachable', highest: milliosmPerKg, size: next }
+      const slope = (milliosmPerKg - atLow) / (next - low)
+      ;[low, atLow] = [next, milliosmPerKg]
+      const further = slope > 0 ? next + stepUp(next, wanted - atLow, slope) : next * 2
+      next = refused ? Math.min(further, (low + refused.size) / 2) : Math.min(further, largest)
     }
-    if (next >= largest) return { status: 'unreachable', highest: milliosmPerKg, size: next }
-    const slope = (milliosmPerKg - atLow) / (next - low)
-    low = next
-    atLow = milliosmPerKg
-    next = Math.min(
-      largest,
-      slope > 0 ? next + Math.min(next * 3, (1.02 * (wanted - atLow)) / slope) : next * 2,
-    )
+    if (refused && low > 0 && refused.size - low < narrow * low) break
   }
   return { status: 'unreachable', highest: atLow, size: low }
 }
 
-/** The model stopped answering on the way up: at once, the adjuster itself is unknown; later, it is out of reach. */
-function beyondModel(low: number, atLow: number, code: string): Bracket {
-  return low === 0 ? { status: 'cannot-size', code } : { status: 'unreachable', highest: atLow, size: low }
-}
+/* The edge of what the model answers is found to this part of a size. */
+const narrow = 1e-3
+
+/** A hair beyond the straight line, so that a nearly straight reading is bracketed at once; never more than fourfold. */
+const stepUp = (size: number, missing: number, slope: number) =>
+  Math.min(size * 3, (1.02 * missing) / slope + 1e-4 * size)

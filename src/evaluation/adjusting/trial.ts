@@ -1,4 +1,5 @@
 import { effectiveReadingOf, quick, readingOf, solve, type Portion } from '../model.ts'
+import { formalParticles } from '../methods/vantHoff.ts'
 import { massesAt } from './shares.ts'
 import type { Plan } from './plan.ts'
 import type { Sizing, Trial } from './size.ts'
@@ -26,10 +27,25 @@ export function adjusterPortions(plan: Plan, size: number): readonly Portion[] {
 export function sizingOf(fixed: readonly Portion[], target: Target, wanted: number, plan: Plan): Sizing {
   return {
     wanted,
-    guess: plan.setting.volumeMl / 100 / plan.adjusters.reduce((sum, { share }) => sum + share, 0),
+    guess: (missing) => (missing / 1000) * (plan.setting.volumeMl / 1000) * gramsPerOsmole(plan),
     largest: largestSizeOf(plan),
     trial: (size) => trialOf([...fixed, ...adjusterPortions(plan, size)], target, plan),
   }
+}
+
+/* Ions of dilute salts count for this much of their number, and a solute without a formula is taken for a salt. */
+const usualCoefficient = 0.93
+const usualGramsPerOsmole = 30
+
+/** Size that brings one osmole into the volume, roughly. */
+function gramsPerOsmole({ adjusters }: Plan): number {
+  const osmolesPerSize = adjusters.reduce((sum, { ingredient, share }) => {
+    const count = formalParticles(ingredient)
+    const molarMass = ingredient.molarMass?.value
+    const perGram = count && molarMass ? (count * usualCoefficient) / molarMass : 1 / usualGramsPerOsmole
+    return sum + share * perGram
+  }, 0)
+  return 1 / osmolesPerSize
 }
 
 /* A solute weighs at most a few times the water it displaces: beyond this nothing is left to dissolve it. */
@@ -48,7 +64,7 @@ export const fractionSizing = (
   plan: Plan,
 ): Sizing => ({
   wanted,
-  guess: 0.5,
+  guess: () => 0.5,
   largest: 1,
   trial: (fraction) =>
     trialOf(

@@ -56,8 +56,8 @@ function osmoticPressure({ osmolalityOsmPerKg, celsius }: ThermalState, { conven
 }
 
 /**
- * The part outside red cells, with what the reflection coefficients leave open: their standard uncertainties, and
- * the whole share of a solute whose coefficient nobody knows at the low end.
+ * The part outside red cells, with what the reflection coefficients leave open. A solute that counts whole cannot
+ * count for more, so its uncertainty reaches down alone; one whose coefficient nobody knows reaches down to nothing.
  */
 function effectiveInterval(
   state: SolutionState,
@@ -67,13 +67,17 @@ function effectiveInterval(
 ): Interval {
   const value = effectiveReadingOf(state, plan.conventions)
   const scale = reading / state.states.freezing.osmolalityOsmPerKg
-  let variance = reading > 0 ? ((standardUncertainty * value) / reading) ** 2 : 0
-  let unknown = 0
+  const common = reading > 0 ? ((standardUncertainty * value) / reading) ** 2 : 0
+  let [downwards, upwards, unknown] = [common, common, 0]
   for (const { reflection, osmolalityOsmPerKg } of state.shares) {
     const share = osmolalityOsmPerKg * scale
     if (reflection === null) unknown += share
-    else variance += (share * (reflection.uncertainty ?? 0)) ** 2
+    else {
+      const variance = (share * (reflection.uncertainty ?? 0)) ** 2
+      downwards += variance
+      if (reflection.value < 1) upwards += variance
+    }
   }
-  const interval = intervalAround(value, Math.sqrt(variance))
-  return { ...interval, low: interval.low - unknown }
+  const down = intervalAround(value, Math.sqrt(downwards))
+  return { ...down, low: down.low - unknown, high: intervalAround(value, Math.sqrt(upwards)).high }
 }

@@ -4,10 +4,15 @@ import type { Finding, LineAnswer } from '../types.ts'
 import type { RemarkContext } from './remarkContext.ts'
 import { namesOf } from './tonicity.ts'
 
-/** Methods far apart, with who makes the difference. */
+/**
+ * Methods far apart, with who makes the difference. The ideal count of labels lies above every measurement by its
+ * nature and stands aside.
+ */
 export function spreadRemarks({ plan, methods, solution, lines }: RemarkContext): Finding[] {
   const known = methods.flatMap((method) =>
-    method.osmolalityMilliosmPerKg === null ? [] : [{ method, value: method.osmolalityMilliosmPerKg }],
+    method.osmolalityMilliosmPerKg === null || method.method === 'vant-hoff'
+      ? []
+      : [{ method, value: method.osmolalityMilliosmPerKg }],
   )
   const lowest = known.toSorted((a, b) => a.value - b.value)[0]
   const highest = known.toSorted((a, b) => b.value - a.value)[0]

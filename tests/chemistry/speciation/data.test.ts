@@ -1,7 +1,4 @@
 import { describe, expect, it } from 'vitest'
-import sources from '../../../data/sources/equilibria.json'
-import general from '../../../data/sources/general.json'
-import { equilibriaFiles, speciesFiles } from '../../../src/library/equilibria.ts'
 import { equilibria, species } from './parts.ts'
 import { electrolytes } from './real.ts'
 
@@ -17,13 +14,6 @@ function writtenCharge(id: string): number {
   const written = /([+-])(\d*)$/.exec(id)
   if (!written) return 0
   return Number(written[2] || '1') * (written[1] === '+' ? 1 : -1)
-}
-
-/** Every value of a key anywhere in a file. */
-function gather(content: unknown, key: string): unknown[] {
-  if (Array.isArray(content)) return content.flatMap((item) => gather(item, key))
-  if (content === null || typeof content !== 'object') return []
-  return Object.entries(content).flatMap(([name, value]) => (name === key ? [value] : gather(value, key)))
 }
 
 describe('species', () => {
@@ -80,17 +70,5 @@ describe('equilibria', () => {
         ),
     )
     expect(missing).toEqual([])
-  })
-
-  it('name a source for every figure, and use every source', () => {
-    const used = new Set(
-      [...Object.values(equilibriaFiles), ...Object.values(speciesFiles)].flatMap((file) =>
-        gather(file, 'source'),
-      ),
-    )
-    const known = new Set([...sources, ...general].map((source) => source.key))
-    expect([...used].filter((key) => !known.has(String(key)))).toEqual([])
-    const elsewhere = ['BatesGuggenheim1960']
-    expect(sources.map((source) => source.key).filter((key) => !used.has(key))).toEqual(elsewhere)
   })
 })

@@ -101,6 +101,8 @@ describe('remarks', () => {
     expect(codesOf(solveWith(parts, totals).remarks)).toEqual(['complex-unknown'])
     expect(solveWith(parts, { ...totals, citrate: 0, 'Na+': 0 }).remarks).toEqual([])
     expect(solveWith(parts, { 'Zn+2': 0.01, 'Cl-': 0.02 }).remarks).toEqual([])
+    const sweet = solveWith(parts, { borate: 0.1, 'D-mannitol': 0.2 })
+    expect(sweet.remarks[0]?.values).toEqual({ metal: 'D-mannitol', ligand: 'borate' })
   })
 
   it('says when an enthalpy had to be assumed, and only away from 25 °C', () => {

@@ -83,7 +83,13 @@ function milliequivalents(evaluation: Evaluation, ion: string | undefined): numb
 
 /** E of the example: its measured-i sum against that of sodium chloride with i 1.8 and 58.5 g/mol. */
 function equivalentFromFactor(evaluation: Evaluation): number {
-  const salt = ownIngredient({ name: 'Sodium chloride', molarMass: 58.5, measuredI: 1.8, ions: [1, -1] })
+  const salt = ownIngredient({
+    name: 'Sodium chloride',
+    molarMass: 58.5,
+    measuredI: 1.8,
+    ions: [1, -1],
+    electrolyteClass: 'uni-univalent',
+  })
   const reference = evaluated([line(salt, '1 %')])
   return traced(evaluation, 'vant-hoff', 'measured-sum') / traced(reference, 'vant-hoff', 'measured-sum')
 }
