@@ -6,7 +6,14 @@ import {
 import { solveSolution } from '../chemistry/solution.ts'
 import type { Conventions } from '../library/conventions.ts'
 import type { Library } from '../library/library.ts'
-import type { Composition, Dissolved, SolutionState, SoluteShare } from '../chemistry/types.ts'
+import type {
+  ChemistryProblem,
+  Composition,
+  Dissolved,
+  SolutionResult,
+  SolutionState,
+  SoluteShare,
+} from '../chemistry/types.ts'
 import type { Ingredient } from '../library/types.ts'
 
 export interface Portion {
@@ -42,12 +49,32 @@ function dissolvedOf({ key, ingredient, grams }: Portion): Dissolved {
   return { key, ingredient, amount }
 }
 
-export const solve = (
+/** The solution of some portions; one that makes no physical sense is refused like one that has no answer. */
+export function solve(
   portions: readonly Portion[],
   setting: Setting,
   library: Library,
   options?: typeof quick,
-) => solveSolution(compositionOf(portions, setting), library, options)
+): SolutionResult {
+  const result = solveSolution(compositionOf(portions, setting), library, options)
+  if (result.status === 'refused' || isPhysical(result.state)) return result
+  return { status: 'refused', problems: [outsideValidity(portions)] }
+}
+
+/** No solute takes water's activity above that of pure water. */
+const isPhysical = ({ states, shares }: SolutionState): boolean =>
+  Object.values(states).every(({ osmolalityOsmPerKg }) => osmolalityOsmPerKg >= -noise) &&
+  shares.every(({ osmolalityOsmPerKg }) => osmolalityOsmPerKg >= -noise)
+
+/* Pure water comes out at the molality of its own ions, give or take rounding. */
+const noise = 1e-6
+
+const outsideValidity = (portions: readonly Portion[]): ChemistryProblem => ({
+  code: 'model-outside-validity',
+  values: {},
+  keys: portions.map(({ key }) => key),
+  fatal: true,
+})
 
 /**
  * What a freezing-point osmometer shows: ΔTf / 1.860 K·kg/mol with the depression from the water activity at

@@ -20,6 +20,10 @@ const binary = v.strictObject({
   source: v.string(),
   temperatureSource: v.optional(v.string()),
   fromMemory: v.optional(v.boolean()),
+  /** Temperature of the measurements behind `at25` where it is not 25 °C. */
+  measuredAtCelsius: v.optional(v.number()),
+  /** `low`: not from osmotic data. `stand-in`: converted from another theory. Each is named in a finding. */
+  quality: v.optional(v.picklist(['low', 'stand-in'])),
   /** Measurements it was fitted to: never a check of it. */
   fittedOn: v.optional(v.string()),
   note: v.optional(v.string()),
@@ -30,6 +34,7 @@ const mixing = v.strictObject({
   ions: v.array(v.string()),
   value: coefficient,
   source: v.string(),
+  fittedOn: v.optional(v.string()),
 })
 const neutral = mixing
 

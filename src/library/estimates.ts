@@ -19,6 +19,7 @@ const estimatesSchema = v.strictObject({
   waterOfVolume: datum,
   missingPair: datum,
   missingTemperature: datum,
+  temperatureForm: datum,
   outOfRange: datum,
   leastModelUncertainty: datum,
 })

@@ -1,4 +1,5 @@
 import * as v from 'valibot'
+import activity from '../../data/findings/activity.json'
 import chemistry from '../../data/findings/chemistry.json'
 import evaluation from '../../data/findings/evaluation.json'
 import speciation from '../../data/findings/speciation.json'
@@ -27,7 +28,7 @@ const findingTextsSchema = v.array(
 )
 
 /** Each room brings its own words. */
-export const findingFiles: Readonly<Record<string, unknown>> = { chemistry, evaluation, speciation }
+export const findingFiles: Readonly<Record<string, unknown>> = { activity, chemistry, evaluation, speciation }
 
 /** The words of every finding; a code stands once. */
 export function loadFindings(): readonly FindingText[] {

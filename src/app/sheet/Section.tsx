@@ -37,7 +37,9 @@ const Fields = ({ fields }: Pick<Of<'fields'>, 'fields'>) => (
       <div key={label}>
         <dt>{label}</dt>
         {value === null ? (
-          <dd className="paper-blank" aria-label="blank, to be filled in by hand" />
+          <dd className="paper-blank">
+            <span className="unseen">blank, to be filled in by hand</span>
+          </dd>
         ) : (
           <dd>{value}</dd>
         )}

@@ -4,7 +4,7 @@ import { openText } from '../menu/files.ts'
 import type { PageState, PageStore, Paper } from '../state/store.ts'
 import type { Desk } from './desk.ts'
 import { refusalSentence, type KeptSheet, type Shelf } from './shelf.ts'
-import { latestWriter } from './writer.ts'
+import { promptWriter } from './writer.ts'
 
 interface Tools {
   readonly store: PageStore
@@ -37,7 +37,7 @@ export function startAutosave(tools: Tools, loadedStamp: string | null): Autosav
   let seated = false
   let stamp = loadedStamp
 
-  const writer = latestWriter<KeptSheet>(
+  const writer = promptWriter<KeptSheet>(
     (sheet) => shelf.write(sheet),
     (sheet) => {
       stamp = sheet.stamp

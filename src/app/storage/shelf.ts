@@ -1,4 +1,4 @@
-import { createStore, get, set, type UseStore } from 'idb-keyval'
+import { createStore, get, promisifyRequest, type UseStore } from 'idb-keyval'
 
 /** What is kept of the sheet on the desk: the document as text and whatever could not be taken from its cells. */
 export interface KeptSheet {
@@ -25,10 +25,18 @@ export function browserShelf(): Shelf {
   const opened = () => (store ??= createStore('evenwater', 'sheets'))
   return {
     read: async () => keptSheet(await get<unknown>(key, opened())),
-    write: async (sheet) => set(key, sheet, opened()),
-    setAside: async (sheet) => set(asideKey, sheet, opened()),
+    write: async (sheet) => putPromptly(opened(), key, sheet),
+    setAside: async (sheet) => putPromptly(opened(), asideKey, sheet),
   }
 }
+
+/** Commits without waiting to be asked, so that the write is carried out even when the page goes in the meantime. */
+const putPromptly = (store: UseStore, at: string, sheet: KeptSheet): Promise<void> =>
+  store('readwrite', (objects) => {
+    objects.put(sheet, at)
+    objects.transaction.commit()
+    return promisifyRequest(objects.transaction)
+  })
 
 function keptSheet(value: unknown): KeptSheet | undefined {
   if (typeof value !== 'object' || value === null) return undefined

@@ -1,34 +1,31 @@
 /**
- * Writes the latest state one after the other: while a write runs, only the newest of the waiting states is kept.
- * Nothing is delayed, so at most the state in flight is missing when the page is killed.
+ * Hands every state to the storage at once, without waiting for the one before: the storage keeps the order, and
+ * at most the state in flight is missing when the page is killed.
  */
-export function latestWriter<T>(
+export function promptWriter<T>(
   write: (state: T) => Promise<void>,
   onWritten: (state: T) => void,
   onRefused: (error: unknown) => void,
 ) {
-  let waiting: { readonly state: T } | null = null
-  let running: Promise<void> | null = null
+  let newest = 0
+  let written: Promise<void> = Promise.resolve()
 
-  const run = async () => {
-    while (waiting) {
-      const { state } = waiting
-      waiting = null
-      try {
-        await write(state)
-        onWritten(state)
-      } catch (error) {
-        onRefused(error)
-      }
+  /** Only the newest state says how things stand; an older refusal may be mended already. */
+  const attempt = async (state: T, order: number) => {
+    try {
+      await write(state)
+      if (order === newest) onWritten(state)
+    } catch (error) {
+      if (order === newest) onRefused(error)
     }
-    running = null
   }
   return {
     put(state: T) {
-      waiting = { state }
-      running ??= run()
+      newest += 1
+      const attempted = attempt(state, newest)
+      written = written.then(() => attempted)
     },
     /** Resolves when nothing is left to write. */
-    settled: () => running ?? Promise.resolve(),
+    settled: () => written,
   }
 }

@@ -13,8 +13,14 @@ export interface PairTerm {
   readonly alpha2: number
   /** C = Cφ / (2 √|z₊z₋|). */
   readonly c: number
+  /** Ions of each kind in one formula unit of the salt. */
+  readonly perUnit: { readonly cation: number; readonly anion: number }
   readonly row: BinaryRow
 }
+
+/** Molality of the salt whose ions these would be, the more plentiful ion counting. */
+export const saltMolality = ({ cation, anion, perUnit }: PairTerm, m: Float64Array): number =>
+  Math.max((m[cation] ?? 0) / perUnit.cation, (m[anion] ?? 0) / perUnit.anion)
 
 export interface LikeTerm {
   readonly first: number
@@ -116,8 +122,15 @@ function pairTerm(cation: number, anion: number, row: BinaryRow, context: Contex
     alpha1: row.alpha1,
     alpha2: row.alpha2,
     c: atCelsius(row.cphi, at) / (2 * Math.sqrt(-chargeAt(context, cation) * chargeAt(context, anion))),
+    perUnit: formulaUnit(chargeAt(context, cation), -chargeAt(context, anion)),
     row,
   }
+}
+
+function formulaUnit(cationCharge: number, anionCharge: number): PairTerm['perUnit'] {
+  let [common, rest] = [cationCharge, anionCharge]
+  while (rest !== 0) [common, rest] = [rest, common % rest]
+  return { cation: anionCharge / common, anion: cationCharge / common }
 }
 
 function likeTerms(

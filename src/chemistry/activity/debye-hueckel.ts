@@ -6,7 +6,7 @@ const charge = 1.602176634e-19
 const boltzmann = 1.380649e-23
 const vacuum = 8.8541878128e-12
 
-/** kg/m³, 0 to 100 °C. Kell 1975. @example waterDensity(25) → 997.05 */
+/** kg/m³, 0 to 100 °C. Kell 1975. @example waterDensity(25) → 997.045 */
 export function waterDensity(celsius: number): number {
   const t = celsius
   const above =

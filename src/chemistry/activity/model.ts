@@ -6,7 +6,8 @@ import { debyeHueckelSlope } from './debye-hueckel.ts'
 import { flatten, type Flat } from './flat.ts'
 import { lnActivityCoefficients } from './ln-gamma.ts'
 import { unlikeCharges } from './mixing.ts'
-import { mixtureUncertainty, pairRemarks, type PairRemark } from './uncertainty.ts'
+import { pairRemarks, type PairRemark } from './remarks.ts'
+import { mixtureUncertainty } from './uncertainty.ts'
 
 export interface Osmotic {
   readonly osmoticCoefficient: number

@@ -14,7 +14,7 @@ const made = new WeakMap<ElectrolyteParameters, (percent: number) => number>()
 
 /**
  * Osmolality at freezing of sodium chloride solutions by % w/v at 20 °C: the yardstick of every tabulated equivalent.
- * @example sodiumChlorideOsmolality(parts)(0.9) → 0.2866
+ * @example sodiumChlorideOsmolality(parts)(0.9) → 0.2867
  */
 export function sodiumChlorideOsmolality(parts: Parts): (percentWeightInVolume: number) => number {
   const known = made.get(parts.electrolytes)

@@ -67,6 +67,13 @@ function curveProblem(solute: Solute): readonly ChemistryProblem[] {
   return last && Math.log(solute.molality) > last.ln + 0.7 ? [problem('table-left', {}, [solute])] : []
 }
 
+const pairCodes = {
+  missing: 'missing-interaction-pair',
+  'beyond-range': 'beyond-molality-range',
+  'low-quality': 'low-quality-pair',
+  'stand-in': 'stand-in-pair',
+} as const
+
 function pairProblems(
   { pool }: Mixture,
   { activity }: ReadySystem,
@@ -77,9 +84,7 @@ function pairProblems(
     .remarks(pool.molalities)
     .filter(({ weight }) => weight >= noticeable)
     .map(({ cation, anion, kind, maximumMolality }) =>
-      kind === 'missing'
-        ? problem('missing-interaction-pair', { cation, anion }, [])
-        : problem('beyond-molality-range', { cation, anion, maximumMolality: maximumMolality ?? 0 }, []),
+      problem(pairCodes[kind], { cation, anion, ...(maximumMolality ? { maximumMolality } : {}) }, []),
     )
 }
 

@@ -3,7 +3,12 @@ import { findRoot } from '../../numeric/roots.ts'
 /** What a trial of one size reads: mOsm/kg on the target's count, or why the model has no answer. */
 export type Trial =
   | { readonly status: 'read'; readonly milliosmPerKg: number }
-  | { readonly status: 'refused'; readonly code: string }
+  | {
+      readonly status: 'refused'
+      readonly code: string
+      /** True where the size does not matter: nothing is known of the adjuster. */
+      readonly forWantOfData?: boolean
+    }
 
 export type Sized =
   | { readonly status: 'found'; readonly size: number; readonly without: number }
@@ -84,7 +89,8 @@ function bracketFrom(without: number, { wanted, guess, largest, trial }: Sizing)
     const reading = trial(next)
     if (reading.status === 'refused') {
       refused = { size: next, code: reading.code }
-      if (low === 0 && round > 20) return { status: 'cannot-size', code: refused.code }
+      if (reading.forWantOfData || (low === 0 && round > 20))
+        return { status: 'cannot-size', code: refused.code }
       next = (low + next) / 2
     } else {
       const { milliosmPerKg } = reading

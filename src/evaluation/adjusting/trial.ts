@@ -8,13 +8,12 @@ import { countsEffective, type Target } from './target.ts'
 /** What a mixture reads on the count of the target. */
 export function trialOf(portions: readonly Portion[], target: Target, plan: Plan): Trial {
   const result = solve(portions, plan.setting, plan.library, quick)
-  if (result.status === 'refused')
-    return { status: 'refused', code: result.problems[0]?.code ?? 'model-refused' }
+  if (result.status === 'refused') {
+    const code = result.problems[0]?.code ?? 'model-problem'
+    return { status: 'refused', code, forWantOfData: code === 'no-osmotic-data' }
+  }
   const read = countsEffective(target) ? effectiveReadingOf : readingOf
-  const milliosmPerKg = read(result.state, plan.conventions)
-  return Number.isFinite(milliosmPerKg)
-    ? { status: 'read', milliosmPerKg }
-    : { status: 'refused', code: 'non-finite-result' }
+  return { status: 'read', milliosmPerKg: read(result.state, plan.conventions) }
 }
 
 /** Portions of the adjusters at a common size. */

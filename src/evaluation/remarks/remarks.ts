@@ -4,7 +4,7 @@ import { isBeyondOsmometer } from '../model.ts'
 import type { Finding } from '../types.ts'
 import { equivalentRemarks, missingRemarks, spreadRemarks } from './methodRemarks.ts'
 import type { RemarkContext } from './remarkContext.ts'
-import { namesOf, tonicityRemarks } from './tonicity.ts'
+import { namesOf, reflectionRemarks, tonicityRemarks } from './tonicity.ts'
 import { weighingRemarks } from './weighing.ts'
 
 /** The program's own remarks on an answered formula; cautions of the trade come from data and stand beside them. */
@@ -22,6 +22,7 @@ export function remarksOn({ plan, standing }: Question, answered: Answered): Fin
   return [
     ...weighingRemarks(context),
     ...tonicityRemarks(context),
+    ...reflectionRemarks(context),
     ...spreadRemarks(context),
     ...missingRemarks(context),
     ...equivalentRemarks(context),

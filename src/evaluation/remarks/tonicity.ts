@@ -29,6 +29,22 @@ export function tonicityRemarks({ plan, solution, lines }: RemarkContext): Findi
 const passingOf = ({ osmolalityShareMilliosmPerKg, effectiveOsmolalityShareMilliosmPerKg }: LineAnswer) =>
   (osmolalityShareMilliosmPerKg ?? 0) - (effectiveOsmolalityShareMilliosmPerKg ?? 0)
 
+/** Solutes counted as staying outside red cells although no source says so. */
+export function reflectionRemarks({ plan, state, lines }: RemarkContext): Finding[] {
+  if (!state) return []
+  const unknown = new Set(state.shares.filter(({ reflection }) => reflection === null).map(({ key }) => key))
+  const named = lines.filter(({ key }) => unknown.has(key))
+  if (named.length === 0) return []
+  const share = named.reduce((sum, line) => sum + (line.osmolalityShareMilliosmPerKg ?? 0), 0)
+  return [
+    findingOf(plan.library, 'reflection-unknown', {
+      values: { ingredient: namesOf(named), share },
+      ingredients: [...new Set(named.map(({ ingredient }) => ingredient.id))],
+      lineKeys: named.map(({ key }) => key),
+    }),
+  ]
+}
+
 /** The names of lines, each once. */
 export const namesOf = (lines: readonly LineAnswer[]): string =>
   [...new Set(lines.map(({ ingredient }) => ingredient.name))].join(', ')

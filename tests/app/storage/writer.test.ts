@@ -1,27 +1,29 @@
 import { describe, expect, it } from 'vitest'
-import { latestWriter } from '../../../src/app/storage/writer.ts'
+import { promptWriter } from '../../../src/app/storage/writer.ts'
 
-describe('the writer of the latest state', () => {
-  it('writes the first state at once and then only the newest that is waiting', async () => {
-    const written: number[] = []
-    const writer = latestWriter<number>(
+describe('the prompt writer', () => {
+  it('hands every state over at once and reports the newest when it is written', async () => {
+    const handed: number[] = []
+    const reported: number[] = []
+    const writer = promptWriter<number>(
       async (state) => {
+        handed.push(state)
         await Promise.resolve()
-        written.push(state)
       },
-      () => undefined,
+      (state) => reported.push(state),
       () => undefined,
     )
-    for (const state of [1, 2, 3, 4]) writer.put(state)
+    for (const state of [1, 2, 3]) writer.put(state)
+    expect(handed).toEqual([1, 2, 3])
     await writer.settled()
-    expect(written).toEqual([1, 4])
+    expect(reported).toEqual([3])
   })
 
   it('tells of a refused write and writes on', async () => {
     const refused: unknown[] = []
     const written: number[] = []
     const full = new Error('full')
-    const writer = latestWriter<number>(
+    const writer = promptWriter<number>(
       async (state) => {
         if (state === 1) throw full
       },

@@ -118,8 +118,12 @@ export interface Deviation {
   readonly percent: number
 }
 
-export function statistics(deviations: readonly Deviation[]): { readonly median: number; readonly p95: number } {
+export function statistics(deviations: readonly Deviation[]): {
+  readonly median: number
+  readonly p95: number
+} {
   const sizes = deviations.map(({ percent }) => Math.abs(percent)).toSorted((a, b) => a - b)
-  const at = (share: number) => sizes[Math.min(sizes.length - 1, Math.ceil(share * sizes.length) - 1)] ?? Number.NaN
+  const at = (share: number) =>
+    sizes[Math.min(sizes.length - 1, Math.ceil(share * sizes.length) - 1)] ?? Number.NaN
   return { median: at(0.5), p95: at(0.95) }
 }

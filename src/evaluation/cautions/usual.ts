@@ -1,0 +1,75 @@
+import { expressNumber } from '../../quantity/express.ts'
+import type { Condition, Usual } from '../../library/conditions.ts'
+import type { UsualStrength } from '../../library/usual-strengths.ts'
+import { amountIn } from './amounts.ts'
+import type { CautionContext, CautionLine } from './context.ts'
+import { perMillilitreOf } from './lineConditions.ts'
+import { outcome, type Outcome } from './outcome.ts'
+import { asShown } from './shown.ts'
+import { selected } from './selectors.ts'
+import { named } from './words.ts'
+
+interface Departure {
+  readonly line: CautionLine
+  readonly text: string
+}
+
+/** Strengths that a person wrote, against the range in which the ingredient is ordinarily used. */
+export function againstUsual(
+  { line: selector, usual }: Extract<Condition, { readonly usual: unknown }>,
+  context: CautionContext,
+): Outcome {
+  const departures = selected(context.lines, selector).flatMap((line): readonly Departure[] => {
+    const text = line.isAdjuster ? null : departureOf(line, usual, context)
+    return text === null ? [] : [{ line, text }]
+  })
+  if (departures.length === 0) return outcome(false)
+  const lines = departures.map(({ line }) => line)
+  return outcome(
+    true,
+    { ingredient: named(lines), details: departures.map(({ text }) => text).join('; ') },
+    lines,
+  )
+}
+
+/**
+ * Above: beyond every range of the ingredient, whatever the route, as a vial is stronger than what is made of it.
+ * Below: only against ranges of this route or of all.
+ */
+function departureOf(line: CautionLine, usual: Usual, context: CautionContext): string | null {
+  const ranges = context.usualStrengths.filter(({ ingredient }) => ingredient === line.ingredient.id)
+  const here = ranges.filter(({ routes }) => !routes || routes.includes(context.routeId))
+  const { timesAbove, timesBelow } = usual
+  const isFarAbove = (range: UsualStrength) =>
+    timesAbove !== undefined && isBeyond(line, range, context, (ratio) => ratio >= timesAbove, range.to)
+  const isFarBelow = (range: UsualStrength) =>
+    timesBelow !== undefined && isBeyond(line, range, context, (ratio) => ratio <= 1 / timesBelow, range.from)
+  if (ranges.length > 0 && ranges.every(isFarAbove)) return told(line, here.length > 0 ? here : ranges, context)
+  if (here.length > 0 && here.every(isFarBelow)) return told(line, here, context)
+  return null
+}
+
+function isBeyond(
+  line: CautionLine,
+  { unit }: UsualStrength,
+  context: CautionContext,
+  test: (ratio: number) => boolean,
+  end: number,
+): boolean {
+  const strength = amountIn(unit, perMillilitreOf(line), context)
+  return typeof strength === 'number' && test(asShown(strength / end, { significant: 4 }))
+}
+
+function told(line: CautionLine, ranges: readonly UsualStrength[], context: CautionContext): string {
+  const [first] = ranges
+  const strength = first ? amountIn(first.unit, perMillilitreOf(line), context) : null
+  const range = ranges
+    .map(({ from, to, unit }) =>
+      from === to
+        ? `${expressNumber(from)} ${unit}`
+        : `${expressNumber(from)} to ${expressNumber(to)} ${unit}`,
+    )
+    .join(' or ')
+  const own = typeof strength === 'number' && first ? `${expressNumber(strength)} ${first.unit}` : 'not known'
+  return `${line.ingredient.name} is at ${own}, usually ${range}`
+}
