@@ -6,7 +6,7 @@ const product = 'node_modules/.cache/evenwater/headless/evaluate.mjs'
 
 try {
   buildOnce(
-    'headless',
+    'headless-mark',
     product,
     () => runTool('vite', ['build', '--config', '.run/headless.config.mjs'], { capture: true }).code,
   )

@@ -7,6 +7,10 @@ export interface Selector {
   readonly roles?: readonly string[]
   /** Species that dissolving gives. */
   readonly releases?: readonly string[]
+  /** Words in the name or a synonym, in lower case: for what a line's own record brings in. */
+  readonly names?: readonly string[]
+  /** Whatever it is. */
+  readonly everything?: true
   /** Whatever has other forms in the library, such as another hydrate. */
   readonly hasOtherForms?: true
   readonly except?: Selector
@@ -67,11 +71,15 @@ export type Condition =
   | { readonly all: readonly Condition[] }
   | { readonly any: readonly Condition[] }
   | { readonly not: Condition }
+  /** Holds until the opposite is known: an exemption that needs a figure does not exempt without it. */
+  | { readonly unless: Condition }
   | { readonly route: readonly string[] }
   | { readonly line: Selector; readonly strength?: Limit & StrengthOf }
   | { readonly line: Selector; readonly pHMinusPKa: Limit & { readonly acidCharge: number } }
   | { readonly line: Selector; readonly usual: Usual }
+  /** Kinds of amount, or units as they were typed. */
   | { readonly line: Selector; readonly orderedIn: readonly string[] }
+  | { readonly line: Selector; readonly writtenIn: readonly string[] }
   | { readonly everyLine: Selector }
   | { readonly together: readonly [Selector, Selector] }
   | { readonly ion: string; readonly amount: Limit & IonAmount }
@@ -90,8 +98,9 @@ export interface IonAmount {
   readonly gramsPerMole?: number
 }
 
-/** Against the usual range: so many times its upper end or more, its lower end divided by so much or less. */
+/** Against the usual range: so many times its upper end or more, its lower end divided by so much or less, or merely outside. */
 export interface Usual {
+  readonly outside?: true
   readonly timesAbove?: number
   readonly timesBelow?: number
 }
@@ -104,6 +113,8 @@ const selectorParts = {
   tags: v.exactOptional(texts),
   roles: v.exactOptional(texts),
   releases: v.exactOptional(texts),
+  names: v.exactOptional(texts),
+  everything: v.exactOptional(v.literal(true)),
   hasOtherForms: v.exactOptional(v.literal(true)),
 }
 const selector = v.pipe(
@@ -151,9 +162,14 @@ const leaves = [
   v.strictObject({ line: selector, pHMinusPKa: limited({ acidCharge: v.pipe(finite, v.integer()) }) }),
   v.strictObject({
     line: selector,
-    usual: v.strictObject({ timesAbove: v.exactOptional(positive), timesBelow: v.exactOptional(positive) }),
+    usual: v.strictObject({
+      outside: v.exactOptional(v.literal(true)),
+      timesAbove: v.exactOptional(positive),
+      timesBelow: v.exactOptional(positive),
+    }),
   }),
   v.strictObject({ line: selector, orderedIn: texts }),
+  v.strictObject({ line: selector, writtenIn: texts }),
   v.strictObject({ everyLine: selector }),
   v.strictObject({ together: v.strictTuple([selector, selector]) }),
   v.strictObject({
@@ -183,5 +199,6 @@ export const conditionSchema: v.GenericSchema<unknown, Condition> = v.union([
   v.strictObject({ all: several() }),
   v.strictObject({ any: several() }),
   v.strictObject({ not: v.lazy(() => conditionSchema) }),
+  v.strictObject({ unless: v.lazy(() => conditionSchema) }),
   ...leaves,
 ]) as v.GenericSchema<unknown, Condition>

@@ -45,23 +45,25 @@ export interface RouteLimits {
   readonly spokenName: string
   readonly isSterile: boolean
   /** The tolerated span in mOsm/kg, as the osmolality axis draws it. */
-  readonly span: {
+  readonly span?: {
     readonly low: number
     readonly high: number
     readonly evidence: EvidenceGrade
     readonly source: SourceKey
     readonly note?: string
   }
-  readonly tonicity: Guardrail
+  /** Absent where the tissue does not mind; `note` says so. */
+  readonly tonicity?: Guardrail
   readonly pH: Guardrail
   readonly preservative: {
-    readonly rule: 'never' | 'single-dose only' | 'multiple-dose only' | 'allowed'
+    readonly rule: 'never' | 'avoid' | 'multiple-dose only'
     readonly evidence: EvidenceGrade
     readonly source: SourceKey
     readonly note?: string
   }
   /** What is aimed at where the order does not say. */
-  readonly target: { readonly quantity: string; readonly text: string }
+  readonly target?: { readonly quantity: string; readonly text: string }
+  readonly note?: string
 }
 
 const filled = v.pipe(v.string(), v.trim(), v.nonEmpty())
@@ -83,14 +85,15 @@ const routesSchema = v.array(
     id: filled,
     spokenName: filled,
     isSterile: v.boolean(),
-    span: v.strictObject({ low: finite, high: finite, ...standing }),
-    tonicity: guardrail,
+    span: v.exactOptional(v.strictObject({ low: finite, high: finite, ...standing })),
+    tonicity: v.exactOptional(guardrail),
     pH: guardrail,
     preservative: v.strictObject({
-      rule: v.picklist(['never', 'single-dose only', 'multiple-dose only', 'allowed']),
+      rule: v.picklist(['never', 'avoid', 'multiple-dose only']),
       ...standing,
     }),
-    target: v.strictObject({ quantity: filled, text: filled }),
+    target: v.exactOptional(v.strictObject({ quantity: filled, text: filled })),
+    note: v.exactOptional(filled),
   }),
 )
 
@@ -120,9 +123,9 @@ export function loadRoutes(): ReadonlyMap<string, RouteLimits> {
   const routes = new Map<string, RouteLimits>()
   for (const route of checked(routesSchema, rawRoutes, 'routes/routes')) {
     const faults = [
-      ...guardrailFaults(route.tonicity),
+      ...(route.tonicity ? guardrailFaults(route.tonicity) : []),
       ...guardrailFaults(route.pH),
-      ...(route.span.low < route.span.high ? [] : ['the span has no width']),
+      ...(!route.span || route.span.low < route.span.high ? [] : ['the span has no width']),
       ...(routes.has(route.id) ? ['the route stands twice'] : []),
     ]
     if (faults.length > 0) throw new Error(`data/routes/routes.json, ${route.id}: ${faults.join('; ')}`)

@@ -19,9 +19,9 @@ export const routeNames: Readonly<Record<RouteId, string>> = {
   enteral: 'by mouth or feeding tube',
 }
 
-const notSterile: readonly RouteId[] = ['nasal', 'otic', 'enteral']
+const notSterile: ReadonlySet<RouteId> = new Set(['nasal', 'otic', 'enteral'])
 
 /** Routes whose preparations are sterile; the others follow their monograph or local policy. */
 export const sterileRoutes: ReadonlySet<RouteId> = new Set(
-  (Object.keys(routeNames) as RouteId[]).filter((route) => !notSterile.includes(route)),
+  (Object.keys(routeNames) as RouteId[]).filter((route) => !notSterile.has(route)),
 )

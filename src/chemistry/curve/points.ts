@@ -14,7 +14,7 @@ export interface Points {
   readonly basis: SoluteShare['basis'] | 'bounded'
 }
 
-const macromolecular = ['polymer', 'nonionic-surfactant']
+const macromolecular: ReadonlySet<string> = new Set(['polymer', 'nonionic-surfactant'])
 
 /**
  * What is known of a solute's osmotic effect, best first: tabulated equivalents, the depression of a 1 % solution, its
@@ -62,7 +62,7 @@ function fromClass(ingredient: Ingredient, { conventions, estimates }: Known): P
 }
 
 function bounds(ingredient: Ingredient, percent: number, estimates: Estimates): Points | null {
-  const isLarge = ingredient.tags.some((tag) => macromolecular.includes(tag))
+  const isLarge = ingredient.tags.some((tag) => macromolecular.has(tag))
   if (!isLarge && percent > estimates.traceUpToPercent.value) return null
   const { value, uncertainty = value } = isLarge
     ? estimates.macromoleculeEquivalent

@@ -12,8 +12,8 @@ export function beyondRoute(
   context: CautionContext,
 ): Outcome {
   const guardrail = context.limits[of]
-  const band = guardrail[beyond]
-  if (!band || (band.low === undefined && band.high === undefined)) return outcome(false)
+  const band = guardrail?.[beyond]
+  if (!guardrail || !band || (band.low === undefined && band.high === undefined)) return outcome(false)
   const unit = routeQuantities[guardrail.quantity]
   const metric: Metric = guardrail.quantity
   const value = readMetric(context, metric, unit)

@@ -1,10 +1,10 @@
 import type { Condition } from '../../library/conditions.ts'
 import { beyondRoute } from './beyond.ts'
 import type { CautionContext } from './context.ts'
-import { ionAmount, lineOrderedIn, linePresent, lineStrength, pHAgainstPKa } from './lineConditions.ts'
+import { ionAmount, lineOrderedIn, lineWrittenIn, linePresent, lineStrength, pHAgainstPKa } from './lineConditions.ts'
 import { crossed, crosses } from './limits.ts'
 import { readMetric } from './metrics.ts'
-import { allOf, anyOf, notOf, outcome, unknown, type Outcome } from './outcome.ts'
+import { allOf, anyOf, notOf, outcome, unknown, unlessOf, type Outcome } from './outcome.ts'
 import { isSelected, selected } from './selectors.ts'
 import { againstUsual } from './usual.ts'
 import { named } from './words.ts'
@@ -14,6 +14,7 @@ export function judge(condition: Condition, context: CautionContext): Outcome {
   if ('all' in condition) return allOf(condition.all.map((part) => judge(part, context)))
   if ('any' in condition) return anyOf(condition.any.map((part) => judge(part, context)))
   if ('not' in condition) return notOf(judge(condition.not, context))
+  if ('unless' in condition) return unlessOf(judge(condition.unless, context))
   if ('route' in condition) return outcome(condition.route.includes(context.routeId))
   if ('everyLine' in condition) return everyLine(condition, context)
   if ('together' in condition) return together(condition, context)
@@ -23,6 +24,7 @@ export function judge(condition: Condition, context: CautionContext): Outcome {
   if ('pHMinusPKa' in condition) return pHAgainstPKa(condition, context)
   if ('usual' in condition) return againstUsual(condition, context)
   if ('orderedIn' in condition) return lineOrderedIn(condition, context)
+  if ('writtenIn' in condition) return lineWrittenIn(condition, context)
   return condition.strength
     ? lineStrength(condition.line, condition.strength, context)
     : linePresent(condition.line, context)

@@ -52,7 +52,9 @@ export function lineStrength(
     if (typeof strength !== 'number') needs.push(strength.need)
     else if (crosses(strength, limit)) over.push({ lines, strength })
   }
-  const [worst] = over.toSorted((a, b) => (isUpper(limit) ? b.strength - a.strength : a.strength - b.strength))
+  const [worst] = over.toSorted((a, b) =>
+    isUpper(limit) ? b.strength - a.strength : a.strength - b.strength,
+  )
   if (!worst) return needs.length > 0 ? unknown(needs, meant) : outcome(false)
   const lines = over.flatMap((each) => each.lines)
   return outcome(
@@ -111,15 +113,24 @@ export function pHAgainstPKa(
   return outcome(true, { ingredient: named(lines), pH, pKa: first.pKa }, lines)
 }
 
-/** Lines whose amount a person wrote in one of these kinds of unit. */
-export function lineOrderedIn({ line: selector, orderedIn }: Case<'orderedIn'>, context: CautionContext): Outcome {
-  const texts = new Map(context.formula.lines.map(({ key, amount }) => [key, amount]))
-  const found = selected(context.lines, selector).filter(({ key }) => {
-    const read = readAmount(texts.get(key) ?? '')
+/** Lines whose amount a person wrote in one of these kinds. */
+export const lineOrderedIn = ({ line, orderedIn }: Case<'orderedIn'>, context: CautionContext): Outcome =>
+  byText(line, context, (text) => {
+    const read = readAmount(text)
     return read.ok && orderedIn.includes(read.value.kind)
   })
-  if (found.length === 0) return outcome(false)
-  const text = found.map(({ key }) => texts.get(key)?.trim()).join(', ')
-  return outcome(true, { ingredient: named(found), text }, found)
-}
 
+/** Lines whose amount a person wrote with one of these units. */
+export const lineWrittenIn = ({ line, writtenIn }: Case<'writtenIn'>, context: CautionContext): Outcome =>
+  byText(line, context, (text) => (text.match(/[a-zA-Z%]+/g) ?? []).some((word) => writtenIn.includes(word)))
+
+function byText(selector: Selector, context: CautionContext, test: (text: string) => boolean): Outcome {
+  const texts = new Map(context.formula.lines.map(({ key, amount }) => [key, amount.trim()]))
+  const found = selected(context.lines, selector).filter(({ key }) => test(texts.get(key) ?? ''))
+  if (found.length === 0) return outcome(false)
+  return outcome(
+    true,
+    { ingredient: named(found), text: found.map(({ key }) => texts.get(key)).join(', ') },
+    found,
+  )
+}

@@ -75,3 +75,6 @@ export function anyOf(parts: readonly Outcome[]): Outcome {
 /** What is negated tells nothing about itself. */
 export const notOf = (part: Outcome): Outcome =>
   part.truth === 'unknown' ? unknown(part.needs) : outcome(!part.truth)
+
+/** Holds unless the part is known to hold. */
+export const unlessOf = (part: Outcome): Outcome => outcome(part.truth !== true)

@@ -43,4 +43,3 @@ const findingOf = (caution: Caution, { values, lines }: Outcome): Finding => ({
   evidence: caution.evidence,
   blocks: false,
 })
-

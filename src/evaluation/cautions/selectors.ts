@@ -5,10 +5,15 @@ import type { CautionLine } from './context.ts'
 const shares = (wanted: readonly string[] | undefined, has: readonly string[]) =>
   wanted?.some((item) => has.includes(item)) ?? false
 
+const isCalled = ({ name, synonyms }: Ingredient, words: readonly string[]) =>
+  [name, ...synonyms].some((text) => words.some((word) => text.toLowerCase().includes(word)))
+
 /** Whether an ingredient is one of those that are meant. */
 export function isSelected(ingredient: Ingredient, selector: Selector): boolean {
-  const { ids, tags, roles, releases, hasOtherForms, except } = selector
+  const { ids, tags, roles, releases, names, everything, hasOtherForms, except } = selector
   const named =
+    everything === true ||
+    (names !== undefined && isCalled(ingredient, names)) ||
     shares(ids, [ingredient.id]) ||
     shares(tags, ingredient.tags) ||
     shares(roles, ingredient.roles) ||

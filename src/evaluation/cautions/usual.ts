@@ -39,22 +39,27 @@ export function againstUsual(
 function departureOf(line: CautionLine, usual: Usual, context: CautionContext): string | null {
   const ranges = context.usualStrengths.filter(({ ingredient }) => ingredient === line.ingredient.id)
   const here = ranges.filter(({ routes }) => !routes || routes.includes(context.routeId))
-  const { timesAbove, timesBelow } = usual
+  const { timesAbove, timesBelow, outside } = usual
   const isFarAbove = (range: UsualStrength) =>
-    timesAbove !== undefined && isBeyond(line, range, context, (ratio) => ratio >= timesAbove, range.to)
+    isBeyond(line, range.unit, range.to, context, (ratio) =>
+      outside ? ratio > 1 : timesAbove !== undefined && ratio >= timesAbove,
+    )
   const isFarBelow = (range: UsualStrength) =>
-    timesBelow !== undefined && isBeyond(line, range, context, (ratio) => ratio <= 1 / timesBelow, range.from)
-  if (ranges.length > 0 && ranges.every(isFarAbove)) return told(line, here.length > 0 ? here : ranges, context)
+    isBeyond(line, range.unit, range.from, context, (ratio) =>
+      outside ? ratio < 1 : timesBelow !== undefined && ratio <= 1 / timesBelow,
+    )
+  if (ranges.length > 0 && ranges.every(isFarAbove))
+    return told(line, here.length > 0 ? here : ranges, context)
   if (here.length > 0 && here.every(isFarBelow)) return told(line, here, context)
   return null
 }
 
 function isBeyond(
   line: CautionLine,
-  { unit }: UsualStrength,
+  unit: UsualStrength['unit'],
+  end: number,
   context: CautionContext,
   test: (ratio: number) => boolean,
-  end: number,
 ): boolean {
   const strength = amountIn(unit, perMillilitreOf(line), context)
   return typeof strength === 'number' && test(asShown(strength / end, { significant: 4 }))

@@ -1,4 +1,4 @@
-import fc from 'fast-check'
+import { assert, double, property } from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { designAliquot, leastWeighable } from '../../../src/evaluation/weighing/aliquot.ts'
 import { loadDevices } from '../../../src/library/devices.ts'
@@ -38,10 +38,10 @@ describe('aliquot', () => {
   })
 
   it('delivers the needed mass, weighs enough, and measures no vessel below its smallest volume', () => {
-    fc.assert(
-      fc.property(
-        fc.double({ min: 1e-6, max: 0.119, noNaN: true }),
-        fc.double({ min: 1, max: 1000, noNaN: true }),
+    assert(
+      property(
+        double({ min: 1e-6, max: 0.119, noNaN: true }),
+        double({ min: 1, max: 1000, noNaN: true }),
         (neededGrams, roomMl) => {
           const plan = designAliquot({ ...need, neededGrams, roomMl }, devices)
           if (!plan) return
