@@ -7,7 +7,9 @@ import type { Layout } from './layout.ts'
 const lowest = -20 * Math.LN10
 const highest = 4 * Math.LN10
 const stillEnough = 1e-15
-const mostSteps = 120
+const mostSteps = 240
+/** As often as this the bracket must have halved, or it is bisected. */
+const lookEvery = 3
 
 export type ProtonSearch =
   | { readonly found: true; readonly lnHydrogen: number }
@@ -28,6 +30,7 @@ export function findNeutral(
   let low = lowest
   let high = highest
   let lnHydrogen = start
+  let width = high - low
   for (let step = 0; step < mostSteps; step++) {
     if (!balanceAt(layout, work, lnHydrogen, isFirst && step === 0, tolerance)) {
       return { found: false, code: 'complexes-not-converged' }
@@ -42,7 +45,9 @@ export function findNeutral(
     else low = lnHydrogen
     const slope = work.positiveSlope / positive - work.negativeSlope / negative
     let next = lnHydrogen - excess / slope
-    if (!(next > low && next < high)) next = (low + high) / 2
+    const isSlow = step % lookEvery === lookEvery - 1 && high - low > width / 2
+    if (isSlow || !(next > low && next < high)) next = (low + high) / 2
+    if (step % lookEvery === lookEvery - 1) width = high - low
     if (Math.abs(next - lnHydrogen) <= stillEnough * Math.abs(lnHydrogen)) {
       return { found: true, lnHydrogen }
     }
