@@ -48,9 +48,13 @@ const unitCounts = (result) => ({
 function browserTests(chromium) {
   const report = join(root, 'node_modules', '.cache', 'evenwater', 'browser.json')
   rmSync(report, { force: true })
-  const { code } = runTool('playwright', ['test', '--config', 'e2e/playwright.config.ts', '--reporter=list,json'], {
-    env: { CHROMIUM_PATH: chromium, PLAYWRIGHT_JSON_OUTPUT_NAME: report },
-  })
+  const { code } = runTool(
+    'playwright',
+    ['test', '--config', 'e2e/playwright.config.ts', '--reporter=list,json'],
+    {
+      env: { CHROMIUM_PATH: chromium, PLAYWRIGHT_JSON_OUTPUT_NAME: report },
+    },
+  )
   count('end-to-end tests on the built page', report, browserCounts, code)
 }
 

@@ -11,6 +11,7 @@ import populations from '../../data/cautions/populations.json'
 import routes from '../../data/cautions/routes.json'
 import { checked } from './checked.ts'
 import { type Condition, conditionSchema } from './conditions.ts'
+import type { FindingText } from './findings.ts'
 import { type EvidenceGrade, evidenceSchema } from './routes.ts'
 import type { SourceKey } from './types.ts'
 
@@ -96,3 +97,13 @@ function gathered(): readonly Caution[] {
   }
   return cautions
 }
+
+/** The cautions' words, as findings are told. */
+export const cautionWords = (): readonly FindingText[] =>
+  loadCautions().map(({ id, severity, message, wayOut, source }) => ({
+    code: id,
+    severity,
+    message,
+    wayOut,
+    source,
+  }))

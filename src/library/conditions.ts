@@ -137,7 +137,7 @@ function isLimit(given: Limit): boolean {
   const sides = Object.keys(limitParts).filter((key) => given[key as keyof Limit] !== undefined)
   if (!shapes.has(sides.sort().join())) return false
   if (sides.length === 1) return true
-  return (given.below ?? given.from ?? 0) < (given.above ?? given.to ?? 0)
+  return (given.below ?? given.from ?? 0) <= (given.above ?? given.to ?? 0)
 }
 const limited = <const Parts extends v.ObjectEntries>(parts: Parts) =>
   v.pipe(
@@ -148,35 +148,39 @@ const limited = <const Parts extends v.ObjectEntries>(parts: Parts) =>
 const unit = v.picklist(amountUnits)
 const positive = v.pipe(finite, v.gtValue(0))
 
-const leaves = [
-  v.strictObject({ route: texts }),
-  v.strictObject({
-    line: selector,
-    strength: v.exactOptional(
-      limited({
-        unit,
-        of: v.exactOptional(v.picklist(['each', 'sum'])),
-      }),
-    ),
-  }),
-  v.strictObject({ line: selector, pHMinusPKa: limited({ acidCharge: v.pipe(finite, v.integer()) }) }),
-  v.strictObject({
-    line: selector,
+const lineWith = <const Parts extends v.ObjectEntries>(parts: Parts) =>
+  v.strictObject({ line: selector, ...parts })
+
+const several = () => v.pipe(v.array(v.lazy(() => conditionSchema)), v.minLength(1))
+const part = () => v.lazy(() => conditionSchema)
+
+/* By the key that tells the kinds apart; those that begin with a line stand first. */
+const kinds: Readonly<Record<string, v.GenericSchema>> = {
+  pHMinusPKa: lineWith({ pHMinusPKa: limited({ acidCharge: v.pipe(finite, v.integer()) }) }),
+  usual: lineWith({
     usual: v.strictObject({
       outside: v.exactOptional(v.literal(true)),
       timesAbove: v.exactOptional(positive),
       timesBelow: v.exactOptional(positive),
     }),
   }),
-  v.strictObject({ line: selector, orderedIn: texts }),
-  v.strictObject({ line: selector, writtenIn: texts }),
-  v.strictObject({ everyLine: selector }),
-  v.strictObject({ together: v.strictTuple([selector, selector]) }),
-  v.strictObject({
+  orderedIn: lineWith({ orderedIn: texts }),
+  writtenIn: lineWith({ writtenIn: texts }),
+  line: lineWith({
+    strength: v.exactOptional(limited({ unit, of: v.exactOptional(v.picklist(['each', 'sum'])) })),
+  }),
+  all: v.strictObject({ all: several() }),
+  any: v.strictObject({ any: several() }),
+  not: v.strictObject({ not: part() }),
+  unless: v.strictObject({ unless: part() }),
+  route: v.strictObject({ route: texts }),
+  everyLine: v.strictObject({ everyLine: selector }),
+  together: v.strictObject({ together: v.strictTuple([selector, selector]) }),
+  ion: v.strictObject({
     ion: v.pipe(v.string(), v.nonEmpty()),
     amount: limited({ unit, gramsPerMole: v.exactOptional(positive) }),
   }),
-  v.pipe(
+  measure: v.pipe(
     v.strictObject({
       measure: v.picklist(Object.keys(metricUnits) as Metric[]),
       is: limited({ unit: v.string() }),
@@ -186,19 +190,22 @@ const leaves = [
       'the metric is not seen in that unit',
     ),
   ),
-  v.strictObject({
+  beyond: v.strictObject({
     beyond: v.picklist(['tolerated', 'absolute']),
     of: v.picklist(['tonicity', 'pH']),
   }),
-] as const
+}
 
-const several = () => v.pipe(v.array(v.lazy(() => conditionSchema)), v.minLength(1))
+const kindOf = (given: unknown): string | undefined =>
+  typeof given === 'object' && given !== null ? Object.keys(kinds).find((key) => key in given) : undefined
+
+const noKind = v.pipe(
+  v.unknown(),
+  v.check(() => false, 'not a condition of any known kind'),
+)
 
 /** The trigger tree of a caution. */
-export const conditionSchema: v.GenericSchema<unknown, Condition> = v.union([
-  v.strictObject({ all: several() }),
-  v.strictObject({ any: several() }),
-  v.strictObject({ not: v.lazy(() => conditionSchema) }),
-  v.strictObject({ unless: v.lazy(() => conditionSchema) }),
-  ...leaves,
-]) as v.GenericSchema<unknown, Condition>
+export const conditionSchema = v.lazy((given) => kinds[kindOf(given) ?? ''] ?? noKind) as v.GenericSchema<
+  unknown,
+  Condition
+>

@@ -4,17 +4,21 @@ import mixing from '../../data/parameters/pitzer/mixing.json'
 import neutral from '../../data/parameters/pitzer/neutral.json'
 import steps from '../../data/steps/steps.json'
 import volumetric from '../../data/devices/volumetric.json'
+import { cautionFiles } from './cautions.ts'
 import { curveFiles } from './curves.ts'
 import { equilibriaFiles, speciesFiles } from './equilibria.ts'
 import { estimateFiles } from './estimates.ts'
 import { findingFiles } from './findings.ts'
 import { atomicWeightFiles } from './formula-mass.ts'
 import { ingredientFiles } from './ingredients.ts'
+import { routeFiles } from './routes.ts'
 import { sourceFiles } from './sources.ts'
+import { usualStrengthFiles } from './usual-strengths.ts'
 import { vehicleFiles } from './vehicles.ts'
 
 const folders: Readonly<Record<string, Readonly<Record<string, unknown>>>> = {
   buffers: vehicleFiles,
+  cautions: { ...cautionFiles, ...usualStrengthFiles },
   devices: { volumetric },
   equilibria: equilibriaFiles,
   findings: findingFiles,
@@ -22,6 +26,7 @@ const folders: Readonly<Record<string, Readonly<Record<string, unknown>>>> = {
   parameters: { conventions, ...estimateFiles },
   'parameters/curves': curveFiles,
   'parameters/pitzer': { binary, mixing, neutral },
+  routes: routeFiles,
   sources: sourceFiles,
   species: { ...speciesFiles, ...atomicWeightFiles },
   steps: { steps },

@@ -1,5 +1,6 @@
 import * as v from 'valibot'
 import activity from '../../data/findings/activity.json'
+import cautions from '../../data/findings/cautions.json'
 import chemistry from '../../data/findings/chemistry.json'
 import evaluation from '../../data/findings/evaluation.json'
 import speciation from '../../data/findings/speciation.json'
@@ -28,7 +29,13 @@ const findingTextsSchema = v.array(
 )
 
 /** Each room brings its own words. */
-export const findingFiles: Readonly<Record<string, unknown>> = { activity, chemistry, evaluation, speciation }
+export const findingFiles: Readonly<Record<string, unknown>> = {
+  activity,
+  cautions,
+  chemistry,
+  evaluation,
+  speciation,
+}
 
 /** The words of every finding; a code stands once. */
 export function loadFindings(): readonly FindingText[] {

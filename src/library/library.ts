@@ -1,3 +1,4 @@
+import { type Caution, cautionWords, loadCautions } from './cautions.ts'
 import { contentMark } from './content-mark.ts'
 import { libraryContent } from './content.ts'
 import { type NeutralCurve, loadCurves } from './curves.ts'
@@ -6,6 +7,7 @@ import { type Equilibria, loadEquilibria, loadSpecies } from './equilibria.ts'
 import { type Estimates, loadEstimates } from './estimates.ts'
 import { type FindingText, loadFindings } from './findings.ts'
 import { loadIngredients } from './ingredients.ts'
+import { type RouteLimits, loadRoutes } from './routes.ts'
 import { loadSources } from './sources.ts'
 import { loadSteps, type StepRule } from './steps.ts'
 import type { Ingredient, Source, SpeciesRecord } from './types.ts'
@@ -24,6 +26,10 @@ export interface Library {
   readonly curves: ReadonlyMap<string, NeutralCurve>
   /** What is assumed where nothing was measured. */
   readonly estimates: Estimates
+  /** Limits of the routes. */
+  readonly routes: ReadonlyMap<string, RouteLimits>
+  readonly cautions: readonly Caution[]
+  /** Words of every finding, those of the cautions among them. */
   readonly findings: ReadonlyMap<string, FindingText>
   /** Published buffers made to a volume. */
   readonly vehicles: readonly PublishedVehicle[]
@@ -49,7 +55,9 @@ function assemble(): Library {
     equilibria: loadEquilibria(),
     curves: loadCurves(),
     estimates: loadEstimates(),
-    findings: keyed(loadFindings(), ({ code }) => code),
+    routes: loadRoutes(),
+    cautions: loadCautions(),
+    findings: keyed([...loadFindings(), ...cautionWords()], ({ code }) => code),
     steps: loadSteps(),
     vehicles: loadVehicles(),
   }

@@ -1,3 +1,4 @@
+import cautions from '../../data/sources/cautions.json'
 import conventions from '../../data/sources/conventions.json'
 import curves from '../../data/sources/curves.json'
 import devices from '../../data/sources/devices.json'
@@ -5,11 +6,13 @@ import electrolytes from '../../data/sources/electrolytes.json'
 import equilibria from '../../data/sources/equilibria.json'
 import general from '../../data/sources/general.json'
 import ingredients from '../../data/sources/ingredients.json'
+import routes from '../../data/sources/routes.json'
 import { checked } from './checked.ts'
 import { sourcesSchema } from './schema.ts'
 import type { Source } from './types.ts'
 
 export const sourceFiles: Readonly<Record<string, unknown>> = {
+  cautions,
   conventions,
   curves,
   devices,
@@ -17,6 +20,7 @@ export const sourceFiles: Readonly<Record<string, unknown>> = {
   equilibria,
   general,
   ingredients,
+  routes,
 }
 
 /** All sources by key. The same key may stand in two files only with the same words. */

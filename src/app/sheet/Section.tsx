@@ -5,7 +5,7 @@ import { SheetTable } from './SheetTable.tsx'
 /** One section of the sheet, by its kind. */
 export function Section({ section }: { readonly section: SheetSection }) {
   return (
-    <section className={`paper-section paper-${section.kind}`}>
+    <section className="paper-section">
       <h4>{section.heading}</h4>
       <Body section={section} />
     </section>

@@ -7,7 +7,7 @@ export function SheetTable({ table }: { readonly table: Table }) {
   return (
     <>
       <table className="paper-table">
-        <caption className="visually-hidden">{table.heading}</caption>
+        <caption className="unseen">{table.heading}</caption>
         <thead>
           <tr>
             {table.columns.map(({ label, align, blank }) => (

@@ -1,7 +1,14 @@
 import type { Condition } from '../../library/conditions.ts'
 import { beyondRoute } from './beyond.ts'
 import type { CautionContext } from './context.ts'
-import { ionAmount, lineOrderedIn, lineWrittenIn, linePresent, lineStrength, pHAgainstPKa } from './lineConditions.ts'
+import {
+  ionAmount,
+  lineOrderedIn,
+  lineWrittenIn,
+  linePresent,
+  lineStrength,
+  pHAgainstPKa,
+} from './lineConditions.ts'
 import { crossed, crosses } from './limits.ts'
 import { readMetric } from './metrics.ts'
 import { allOf, anyOf, notOf, outcome, unknown, unlessOf, type Outcome } from './outcome.ts'

@@ -33,23 +33,23 @@ export function againstUsual(
 }
 
 /**
- * Above: beyond every range of the ingredient, whatever the route, as a vial is stronger than what is made of it.
- * Below: only against ranges of this route or of all.
+ * Against the ranges of this route or of all routes. Where there are none, a strength above every other range still
+ * tells: what is made of a vial is not ten times the vial.
  */
 function departureOf(line: CautionLine, usual: Usual, context: CautionContext): string | null {
   const ranges = context.usualStrengths.filter(({ ingredient }) => ingredient === line.ingredient.id)
   const here = ranges.filter(({ routes }) => !routes || routes.includes(context.routeId))
   const { timesAbove, timesBelow, outside } = usual
-  const isFarAbove = (range: UsualStrength) =>
-    isBeyond(line, range.unit, range.to, context, (ratio) =>
+  const isFarAbove = ({ unit, to }: UsualStrength) =>
+    isBeyond(line, unit, to, context, (ratio) =>
       outside ? ratio > 1 : timesAbove !== undefined && ratio >= timesAbove,
     )
-  const isFarBelow = (range: UsualStrength) =>
-    isBeyond(line, range.unit, range.from, context, (ratio) =>
+  const isFarBelow = ({ unit, from }: UsualStrength) =>
+    isBeyond(line, unit, from, context, (ratio) =>
       outside ? ratio < 1 : timesBelow !== undefined && ratio <= 1 / timesBelow,
     )
-  if (ranges.length > 0 && ranges.every(isFarAbove))
-    return told(line, here.length > 0 ? here : ranges, context)
+  const upper = here.length > 0 ? here : ranges
+  if (upper.length > 0 && upper.every(isFarAbove)) return told(line, upper, context)
   if (here.length > 0 && here.every(isFarBelow)) return told(line, here, context)
   return null
 }
