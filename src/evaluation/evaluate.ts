@@ -8,6 +8,7 @@ import { nonFinitePath } from './answers/finite.ts'
 import { blockedEvaluation, type Standing } from './blocked.ts'
 import { evaluateByEquivalents } from './byEquivalents.ts'
 import { finish } from './finish.ts'
+import { guarded } from './guarded.ts'
 import { findingOf } from './finding.ts'
 import { isFinding, lower, type Lowered, type ReadLine } from './lowering.ts'
 import { portionsOf, solve } from './model.ts'
@@ -22,6 +23,10 @@ import { scaleOf } from './yardstick.ts'
  * of lines changes no number; what cannot be answered blocks with a finding that says why.
  */
 export function evaluate(formula: Formula, library: Library): Evaluation {
+  return guarded(answered(formula, library), library)
+}
+
+function answered(formula: Formula, library: Library): Evaluation {
   const { order, findings } = readOrder(formula, library)
   const lines = readLines(formula, library, order.volumeMl)
   findings.push(...lines.findings, ...orderRemarks(formula, lines.lines, library))
