@@ -7,7 +7,7 @@ import { kgPerMolWater } from './activity/model.ts'
 import { sodiumChlorideOsmolality } from './activity/sodium-chloride.ts'
 import { mix, type Mixture } from './mixture/thermal.ts'
 import { problemsOf } from './mixture/problems.ts'
-import { sharesOf } from './mixture/shares.ts'
+import { apparentCount, formalCount, sharesOf } from './mixture/shares.ts'
 import { isProblem, soluteOf, type Solute } from './mixture/solutes.ts'
 import { contentsOf, systemAt, type Contents, type ReadySystem, type SystemParts } from './mixture/system.ts'
 import { soluteTotals, type SoluteTotals } from './mixture/totals.ts'
@@ -231,8 +231,7 @@ function thermalState(
   const { speciated, pool, osmolalityOsmPerKg } = mixture
   const outside = solutes.reduce((sum, solute) => {
     if (solute.kind === 'pool') return sum
-    const formal = (solute.ingredient.releases ?? []).reduce((count, released) => count + released.count, 0)
-    return sum + solute.molality * (formal || 1)
+    return sum + solute.molality * (formalCount(solute) ?? apparentCount(solute))
   }, 0)
   const particles = pool.sumOfMolalities + outside
   const byId = (values: Float64Array, of: (value: number) => number) =>

@@ -8,6 +8,7 @@ import type { AdditiveAnswer } from './methods/answer.ts'
 import { portionsOf } from './model.ts'
 import { remarksOn } from './remarks/remarks.ts'
 import type { Evaluation, Finding, LineAnswer, MethodAnswer, SolutionAnswer } from './types.ts'
+import { aliquotsOf } from './weighing/aliquots.ts'
 import { weighingTrace } from './weighingTrace.ts'
 
 export interface Question {
@@ -46,6 +47,7 @@ export function assembled(question: Question, answered: Answered): Evaluation {
     lines,
     adjuster,
     electrolytes,
+    aliquots: aliquotsOf(lines, plan.balance, volumeMl),
     uncertainty,
     routeSpan: null,
     trace: weighingTrace(plan, lowered),

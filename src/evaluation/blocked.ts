@@ -36,6 +36,7 @@ export function blockedEvaluation(
     lines: read.map((line) => bareLine(line, masses.get(line.key))),
     adjuster,
     electrolytes: [],
+    aliquots: [],
     findings: inOrder(
       findings,
       formula.lines.map(({ key }) => key),

@@ -2,6 +2,7 @@ import type { Interval } from '../quantity/interval.ts'
 import type { Amount } from '../quantity/amount.ts'
 import type { Ingredient, SourceKey } from '../library/types.ts'
 import type { Formula } from '../formula/types.ts'
+import type { AliquotPlan } from './weighing/aliquot.ts'
 import type { SolutionState, UncertaintyPart } from '../chemistry/types.ts'
 
 export type Severity = 'stop' | 'warn' | 'note'
@@ -130,6 +131,13 @@ export interface IonAnswer {
   readonly mEqPerMl: number | null
 }
 
+/** A mass below the least weighable one, in the whole batch; null where no two dilutions reach it. */
+export interface LineAliquot {
+  readonly key: string
+  readonly neededGrams: number
+  readonly plan: AliquotPlan | null
+}
+
 export interface Evaluation {
   readonly status: 'ok' | 'blocked'
   readonly formula: Formula
@@ -143,6 +151,7 @@ export interface Evaluation {
   readonly lines: readonly LineAnswer[]
   readonly adjuster: AdjusterAnswer | null
   readonly electrolytes: readonly IonAnswer[]
+  readonly aliquots: readonly LineAliquot[]
   readonly findings: readonly Finding[]
   readonly uncertainty: readonly UncertaintyPart[]
   readonly routeSpan: {

@@ -27,6 +27,9 @@ export interface Conventions {
   readonly isosmoticLowMilliosmPerKg: Datum
   readonly nearReadingFraction: Datum
   readonly equivalentUncertainty: Datum
+  readonly redCellFixedFraction: Datum
+  readonly plasmaOsmolality: Datum
+  readonly haemolysisOnsetPercent: Datum
   /** K·L/mol by ionic class. */
   readonly lIso: Readonly<Record<ElectrolyteClass, Datum>>
 }
@@ -49,6 +52,9 @@ const conventionsSchema = v.strictObject({
   isosmoticLowMilliosmPerKg: datum,
   nearReadingFraction: datum,
   equivalentUncertainty: datum,
+  redCellFixedFraction: datum,
+  plasmaOsmolality: datum,
+  haemolysisOnsetPercent: datum,
   lIso: v.strictObject({
     'non-electrolyte': datum,
     'weak-electrolyte': datum,

@@ -18,5 +18,7 @@ const device = v.strictObject({
 /** A vessel that measures one volume. */
 export type VolumetricDevice = v.InferOutput<typeof device>
 
+let loaded: readonly VolumetricDevice[] | undefined
+
 /** The volumetric glassware of data/devices. Throws when the file is malformed. */
-export const loadDevices = (): readonly VolumetricDevice[] => v.parse(v.array(device), raw)
+export const loadDevices = (): readonly VolumetricDevice[] => (loaded ??= v.parse(v.array(device), raw))

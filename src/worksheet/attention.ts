@@ -6,12 +6,27 @@ import type { SheetCaution, SheetSection } from './types.ts'
 
 const order: Readonly<Record<Severity, number>> = { stop: 0, warn: 1, note: 2 }
 
-/** Everything to watch, stops first, each with what to do and where it comes from. */
+/** Stops and warnings, stops first, each with what to do and where it comes from. */
 export function attentionSection(evaluation: Evaluation, library: Library): SheetSection {
   const cautions = evaluation.findings
+    .filter(({ severity }) => severity !== 'note')
     .toSorted((first, second) => order[first.severity] - order[second.severity])
     .map((finding) => told(finding, evaluation, library))
   return { kind: 'cautions', heading: 'What to watch', cautions }
+}
+
+/** Remarks that stop nobody, in small print behind the work. */
+export function noteSection(evaluation: Evaluation, library: Library): SheetSection | null {
+  const notes = evaluation.findings.filter(({ severity }) => severity === 'note')
+  if (notes.length === 0) return null
+  return {
+    kind: 'arithmetic',
+    heading: 'Notes',
+    lines: notes.map((finding) => {
+      const { text: said, wayOut, source } = told(finding, evaluation, library)
+      return `${said} ${wayOut} (${source})`
+    }),
+  }
 }
 
 function told(finding: Finding, evaluation: Evaluation, library: Library): SheetCaution {

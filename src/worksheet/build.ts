@@ -1,5 +1,6 @@
+import { aliquotSection } from './aliquots.ts'
 import { arithmeticSections } from './arithmetic.ts'
-import { attentionSection, shutReasons } from './attention.ts'
+import { attentionSection, noteSection, shutReasons } from './attention.ts'
 import { methodSection } from './methods.ts'
 import { orderSection, recordSection } from './order.ts'
 import { contributionSection, electrolyteSection, readingSection, resultSection } from './results.ts'
@@ -34,10 +35,13 @@ function sectionsOf(evaluation: Evaluation, library: Library): readonly SheetSec
     contributionSection(evaluation),
     electrolyteSection(evaluation),
   ].filter((section) => section !== null)
+  const notes = noteSection(evaluation, library)
+  const aliquots = aliquotSection(evaluation)
   return [
     orderSection(evaluation),
     attentionSection(evaluation, library),
     weighingTable(evaluation),
+    ...(aliquots ? [aliquots] : []),
     stepSection(evaluation, library),
     resultSection(evaluation),
     readingSection(evaluation),
@@ -45,6 +49,7 @@ function sectionsOf(evaluation: Evaluation, library: Library): readonly SheetSec
     recordSection(evaluation),
     beyondUseSection(),
     signOffSection(),
+    ...(notes ? [notes] : []),
     ...arithmeticSections(evaluation),
     verificationSection(evaluation),
   ]

@@ -44,7 +44,7 @@ export interface PlacedLabel {
 const padding = 10
 
 /** Estimated width of a text in the page's face; generous, so that labels never touch. */
-export const textWidth = (text: string, size: number) => text.length * size * 0.56
+export const textWidth = (text: string, size: number) => text.length * size * 0.61
 
 interface Wanted {
   readonly key: string

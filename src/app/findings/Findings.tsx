@@ -4,12 +4,30 @@ import { Acknowledgement } from './Acknowledgement.tsx'
 import { SeverityMark } from './SeverityMark.tsx'
 import './findings.css'
 
-/** What to watch: everything that was found, the gravest first, one kind together. */
+/** What to watch: everything that was found, the gravest first, one kind together; notes in small print. */
 export function Findings() {
   const groups = usePage(findingGroups)
+  const grave = groups.filter(({ first }) => first.severity !== 'note')
+  const notes = groups.filter(({ first }) => first.severity === 'note')
   if (groups.length === 0) return <p className="soft">No rule kept here speaks to this formula.</p>
   return (
-    <ul className="findings">
+    <>
+      <FindingList groups={grave} className="findings" />
+      <FindingList groups={notes} className="findings findings-notes" />
+    </>
+  )
+}
+
+function FindingList({
+  groups,
+  className,
+}: {
+  readonly groups: readonly FindingGroup[]
+  readonly className: string
+}) {
+  if (groups.length === 0) return null
+  return (
+    <ul className={className}>
       {groups.map((group) => (
         <FindingItem key={`${group.first.severity} ${group.first.code}`} group={group} />
       ))}
@@ -37,12 +55,6 @@ function FindingItem({ group: { first, told } }: { readonly group: FindingGroup 
 }
 
 /** By whose word, and how well founded. */
-function Standing({ of: { source, evidence, fromMemory } }: { readonly of: FindingView }) {
-  return (
-    <span className="small soft">
-      {source}
-      {evidence !== '' && `; ${evidence}`}
-      {fromMemory && <em>, from memory</em>}
-    </span>
-  )
+function Standing({ of: { standing, fromMemory } }: { readonly of: FindingView }) {
+  return <span className="small soft">{fromMemory ? <em>{standing}</em> : standing}</span>
 }

@@ -1,5 +1,6 @@
 import type { Evaluation, Finding, Severity } from '../../evaluation/types.ts'
 import type { Library } from '../../library/library.ts'
+import type { Source } from '../../library/types.ts'
 import { tellFinding } from '../../worksheet/tell.ts'
 import { cellId } from './cells.ts'
 import { viewOf } from './memo.ts'
@@ -12,8 +13,9 @@ export interface FindingView {
   readonly word: string
   readonly message: string
   readonly wayOut: string
-  readonly source: string
-  readonly evidence: string
+  /** By whose word, and how well founded. */
+  readonly standing: string
+  /** Recalled: marked as such wherever it is shown. */
   readonly fromMemory: boolean
   readonly blocks: boolean
   readonly lineKeys: readonly string[]
@@ -50,8 +52,7 @@ function viewOfFinding(
     word: words[finding.severity],
     message,
     wayOut,
-    source: source?.kind === 'project' ? 'Worked out here.' : (source?.title ?? finding.source),
-    evidence: finding.evidence ?? '',
+    standing: standingOf(source, finding),
     fromMemory: source?.kind === 'from-memory',
     blocks: finding.blocks,
     lineKeys: finding.lineKeys,
@@ -59,6 +60,14 @@ function viewOfFinding(
       evaluation?.formula.acknowledgements?.find((accepted) => accepted.code === finding.code)?.reason ??
       null,
   }
+}
+
+/** What recalls or works out by itself has no title to cite. */
+function standingOf(source: Source | undefined, { source: key, evidence }: Finding): string {
+  if (source?.kind === 'from-memory') return 'from memory'
+  if (source?.kind === 'project') return 'worked out here'
+  const title = source?.kind === 'common-practice' ? 'common practice' : (source?.title ?? key)
+  return evidence === undefined || evidence === title ? title : `${title}; ${evidence}`
 }
 
 /** Findings of one kind told together. */

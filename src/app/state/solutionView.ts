@@ -126,8 +126,7 @@ function figureRows(s: SolutionAnswer): readonly Row[] {
 function cellsSentence(solution: SolutionAnswer | null): string {
   if (!solution) return ''
   const volume = solution.redCellRelativeVolume
-  if (volume === null)
-    return 'For a red cell in it no volume is given: it lies outside the range of the relation.'
+  if (volume === null) return 'Red cells in it burst, or no volume can be given for them.'
   const percent = Math.round((volume - 1) * 100)
   if (percent === 0) return 'A red cell in it keeps the volume it has in plasma.'
   return percent > 0

@@ -53,9 +53,13 @@ function shareOf(solute: Solute, osmolalityOsmPerKg: number, particles: number):
 const basisOf = ({ basis }: Extract<Solute, { kind: 'table' }>): SoluteShare['basis'] =>
   basis === 'bounded' ? 'class-estimate' : basis
 
+/** Particles of a solute with a curve of its own, per mol (per g without a molar mass). */
+export const apparentCount = (solute: Exclude<Solute, { kind: 'pool' }>): number =>
+  solute.kind === 'molecule' ? 1 : countAt(solute.table, solute.molality)
+
 function countedOf(solute: Solute, particles: number): number {
   if (solute.kind === 'pool') return particles / solute.molality
-  return solute.kind === 'molecule' ? 1 : countAt(solute.table, solute.molality)
+  return apparentCount(solute)
 }
 
 /** Ions of water, and of an acid or base that only the pH implies, belong to no line: they are spread over all. */

@@ -53,8 +53,9 @@ export function withShares(
     return {
       ...line,
       particlesFormal: share.particlesFormal,
-      particlesCounted: share.particlesCounted,
-      effectiveI: share.effectiveI,
+      // Without a molar mass the count would be per gram, which nobody reads as particles.
+      particlesCounted: line.ingredient.molarMass ? share.particlesCounted : null,
+      effectiveI: line.ingredient.molarMass ? share.effectiveI : null,
       shareOfParticlesPercent: (countedOf(share) / counted) * 100,
       shareFormalPercent:
         share.particlesFormal === null ? null : ((share.molality * share.particlesFormal) / formal) * 100,

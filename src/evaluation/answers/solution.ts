@@ -40,9 +40,24 @@ export function solutionAnswer(
     pHIsSolved: state.pHSolved,
     densityGPerMl: state.densityGPerMl,
     waterKgPerL: state.waterKgPerLitre,
-    redCellRelativeVolume: null,
+    redCellRelativeVolume: redCellVolume(effectiveReadingOf(state, conventions), plan),
   }
 }
+
+/**
+ * Volume of a red cell in the solution against that in plasma, by Boyle and van 't Hoff: V/V₀ = b + (1 − b)·290/O with
+ * the effective osmolality O and the fixed fraction b. Null where the cell bursts, since there is no volume then.
+ *
+ * @example redCellVolume(290, plan) → 1
+ */
+export function redCellVolume(effective: number, { conventions, scale }: RedCellSetting): number | null {
+  const { redCellFixedFraction: fixed, plasmaOsmolality, haemolysisOnsetPercent } = conventions
+  const bursting = scale.osmolalityOf(haemolysisOnsetPercent.value)
+  if (bursting === null || effective < bursting) return null
+  return fixed.value + ((1 - fixed.value) * plasmaOsmolality.value) / effective
+}
+
+type RedCellSetting = Pick<Plan, 'conventions' | 'scale'>
 
 /** 0.9 % sodium chloride = 0.52 K, in proportion. */
 export const conventionalDepression = (sodiumChloridePercent: number, { conventions }: Plan): number =>

@@ -1,5 +1,4 @@
 import type { Library } from '../../library/library.ts'
-import { loadRoutes } from '../../library/routes.ts'
 import { loadUsualStrengths } from '../../library/usual-strengths.ts'
 import type { Evaluation, LineAnswer, SolutionAnswer } from '../types.ts'
 import type { CautionContext, CautionLine, CautionPatient, CautionSolution } from './context.ts'
@@ -8,10 +7,10 @@ import type { CautionContext, CautionLine, CautionPatient, CautionSolution } fro
 export function cautionContextOf(
   evaluation: Pick<Evaluation, 'formula' | 'volumeMl' | 'lines' | 'solution'>,
   patient: CautionPatient,
-  library: Pick<Library, 'species'>,
+  library: Pick<Library, 'species' | 'routes'>,
 ): CautionContext {
   const { formula, volumeMl, solution } = evaluation
-  const limits = loadRoutes().get(formula.route)
+  const limits = library.routes.get(formula.route)
   if (!limits) throw new Error(`data/routes has no limits for ${formula.route}`)
   const lines = evaluation.lines.map((line) => cautionLine(line, volumeMl))
   return {

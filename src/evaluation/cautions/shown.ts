@@ -1,4 +1,4 @@
-import { rationalOfNumber, roundToStep, toNumber } from '../../quantity/rational.ts'
+import { type Rational, rationalOfNumber, roundToStep, toNumber } from '../../quantity/rational.ts'
 
 /** Digits in which a figure stands on the page and on paper. */
 export type Shown = { readonly decimals: number } | { readonly significant: number }
@@ -14,5 +14,10 @@ export function asShown(value: number, shown: Shown): number {
     'decimals' in shown
       ? -shown.decimals
       : Number(value.toExponential().split('e')[1]) - shown.significant + 1
-  return toNumber(roundToStep(rationalOfNumber(value), rationalOfNumber(10 ** place)))
+  return toNumber(roundToStep(rationalOfNumber(value), tenTo(place)))
 }
+
+const tenTo = (power: number): Rational =>
+  power >= 0
+    ? { numerator: 10n ** BigInt(power), denominator: 1n }
+    : { numerator: 1n, denominator: 10n ** BigInt(-power) }

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest'
 import { judge } from '../../../src/evaluation/cautions/condition.ts'
 import { raiseCautions } from '../../../src/evaluation/cautions/raise.ts'
 import { tellFinding } from '../../../src/worksheet/tell.ts'
+import { meetings } from './cases/meetings.ts'
 import { drugCases, ionCases, preservativeCases } from './cases/incompatibility.ts'
 import { electrolyteCases } from './cases/electrolytes.ts'
 import { handlingCases, nameCases } from './cases/handling.ts'
@@ -62,7 +63,7 @@ describe('every caution', () => {
 })
 
 describe('a caution that yields', () => {
-  const situations = cases.map(([, fires]) => fires)
+  const situations = [...cases.map(([, fires]) => fires), ...meetings]
 
   it.each(
     library.cautions.flatMap(({ id, yieldsTo = [] }) => yieldsTo.map((louder) => [id, louder] as const)),

@@ -69,7 +69,7 @@ export const electrolyteCases: readonly Case[] = [
     {
       route: peripheral,
       lines: { 'potassium-chloride': '40 mmol/L' },
-      patient: { infusionRateMlPerH: 250.1 },
+      patient: { infusionRateMlPerH: 250.2 },
     },
     { patient: { infusionRateMlPerH: 250 } },
   ],

@@ -2,7 +2,7 @@ import type { Case } from '../contexts.ts'
 
 const peripheral = 'intravenous-peripheral'
 const newborn = { ageYears: 28 / 365.25 }
-const older = { ageYears: 29 / 365.25 }
+const older = { ageYears: 29 / 365.25, weightKg: 4 }
 const saline = { 'sodium-chloride': '0.9 %' }
 /* 0.01 g/mL */
 const propyleneGlycol = { 'propylene-glycol': '1 g/100 mL' }
@@ -20,8 +20,8 @@ export const populationCases: readonly Case[] = [
   ],
   [
     'preservative-by-injection-for-a-newborn',
-    { route: 'intramuscular', lines: { phenol: '0.5 %' }, patient: { weightKg: 2.49 } },
-    { patient: { weightKg: 2.5 } },
+    { route: 'intramuscular', lines: { phenol: '0.5 %' }, patient: { ageYears: 0.5, weightKg: 2.49 } },
+    { patient: { ageYears: 0.5, weightKg: 2.5 } },
   ],
   [
     'preservative-for-a-newborn',
