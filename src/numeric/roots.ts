@@ -43,7 +43,7 @@ export function findRoot(
     const step = Math.abs(x - b)
     ;[b, fb] = [x, fx]
     const tolerance = absoluteTolerance + relativeTolerance * Math.max(Math.abs(a), Math.abs(b))
-    if (fx === 0 || Math.abs(b - a) <= tolerance || (step <= tolerance / 4 && step > 0)) {
+    if (fx === 0 || Math.abs(b - a) <= tolerance || step <= tolerance / 4) {
       return { status: 'converged', root: b, iterations: iteration }
     }
   }

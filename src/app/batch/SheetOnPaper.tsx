@@ -28,8 +28,8 @@ export function SheetOnPaper() {
         </span>
         <PrintButton refusal={drawn === evaluation ? refusal : 'The sheet is being drawn.'} />
       </div>
-      {drawn !== null && !isEmpty ? (
-        <Suspense fallback={<p className="soft small no-print">Drawing the sheet…</p>}>
+      {drawn !== null && drawn.status === 'ok' && !isEmpty ? (
+        <Suspense fallback={<p className="soft small">Not a worksheet yet: it is being drawn.</p>}>
           <SheetPreview evaluation={drawn} library={library} paper={paper} />
         </Suspense>
       ) : (
