@@ -8,6 +8,7 @@ import { createPageStore, type Page, type Paper } from './state/store.ts'
 import { readKept, startAutosave } from './storage/autosave.ts'
 import { browserDesk } from './storage/desk.ts'
 import { browserShelf } from './storage/shelf.ts'
+import { samplingActions } from './worker/sampler.ts'
 
 /** Where paper is cut in inches. */
 const letterRegions = /-(US|CA|MX|PH|CL|CO|VE)$/i
@@ -18,6 +19,9 @@ const clock = {
   now: () => performance.now(),
   nextFrame: (run: () => void) => void requestAnimationFrame(run),
 }
+
+const samplingWorker = () =>
+  new Worker(new URL('./worker/sampling.worker.ts', import.meta.url), { type: 'module' })
 
 /** Puts the page together: library, kept sheet, state, evaluation, keeping. */
 export async function startPage(): Promise<Page> {
@@ -44,5 +48,9 @@ export async function startPage(): Promise<Page> {
     kept.kind === 'kept' ? kept.stamp : null,
   )
   keepEvaluated(store, evaluate, clock)
-  return { store, actions: { ...basic, ...autosave }, search: searchIn(library) }
+  return {
+    store,
+    actions: { ...basic, ...autosave, ...samplingActions(store, samplingWorker) },
+    search: searchIn(library),
+  }
 }

@@ -5,7 +5,7 @@ import { debyeHueckelSlope } from './activity/debye-hueckel.ts'
 import { osmolalityAtOwnFreezing } from './activity/freezing.ts'
 import { kgPerMolWater } from './activity/model.ts'
 import { sodiumChlorideOsmolality } from './activity/sodium-chloride.ts'
-import { mix, type Mixture } from './mixture/thermal.ts'
+import { mix, type Mixture, type Movable } from './mixture/thermal.ts'
 import { problemsOf } from './mixture/problems.ts'
 import { apparentCount, formalCount, sharesOf } from './mixture/shares.ts'
 import { isProblem, soluteOf, type Solute } from './mixture/solutes.ts'
@@ -62,21 +62,9 @@ export function solveSolution(
   parts: ChemistryParts,
   options: SolveOptions = {},
 ): SolutionResult {
-  const water = waterIn(composition, parts.species)
-  if ('code' in water) return refused([water])
-  const sorted = sortSolutes(composition, water, parts)
-  if (sorted.problems.length > 0) return refused(sorted.problems)
-  const { solutes } = sorted
-  const work: Work = {
-    composition,
-    parts,
-    water,
-    solutes,
-    contents: contentsOf(solutes, parts.species),
-    totals: soluteTotals(solutes, parts.species),
-  }
-  const condition = conditionOf(work)
-  if (condition.status === 'failed') return refused([failureProblem(condition.failure, work)])
+  const prepared = prepare(composition, parts)
+  if ('problems' in prepared) return refused(prepared.problems)
+  const { work, condition } = prepared
   const solved = new Map<Temperature, Solved>()
   for (const temperature of options.temperatures ?? everyTemperature) {
     const outcome =
@@ -88,6 +76,43 @@ export function solveSolution(
   }
   const state = stateOf(work, solved, condition.implied, options.uncertainty ?? true)
   return state ?? refused([{ code: 'mixture-not-converged', values: {}, keys: [], fatal: true }])
+}
+
+interface Prepared {
+  readonly work: Work
+  readonly condition: Extract<Condition, { status: 'ready' }>
+}
+
+/** Water, the sorted solutes and the proton condition: what all temperatures share. */
+function prepare(
+  composition: Composition,
+  parts: ChemistryParts,
+): Prepared | { readonly problems: readonly ChemistryProblem[] } {
+  const water = waterIn(composition, parts.species)
+  if ('code' in water) return { problems: [water] }
+  const { solutes, problems } = sortSolutes(composition, water, parts)
+  if (problems.length > 0) return { problems }
+  const work: Work = {
+    composition,
+    parts,
+    water,
+    solutes,
+    contents: contentsOf(solutes, parts.species),
+    totals: soluteTotals(solutes, parts.species),
+  }
+  const condition = conditionOf(work)
+  return condition.status === 'ready'
+    ? { work, condition }
+    : { problems: [failureProblem(condition.failure, work)] }
+}
+
+/** The mixture at freezing, ready to be asked again with errors in its inputs; null where it has no answer. */
+export function movableMixture(composition: Composition, parts: ChemistryParts): Movable | null {
+  const prepared = prepare(composition, parts)
+  if ('problems' in prepared) return null
+  const { work, condition } = prepared
+  const cold = solveAt(celsiusOf.freezing, condition.totals, work)
+  return 'status' in cold ? null : { solutes: work.solutes, ...cold }
 }
 
 const refused = (problems: readonly ChemistryProblem[]): SolutionResult => ({ status: 'refused', problems })

@@ -61,6 +61,10 @@ export interface SoluteShare {
 
 /** A standard uncertainty of the headline that comes from one named input, mOsm/kg. */
 export interface UncertaintyPart {
+  /** What an error of it moves: a solute's curve, the pool's model, an amount, or all amounts at once. */
+  readonly kind: 'curve' | 'pool' | 'amount' | 'every-amount'
+  /** Standard uncertainty of what it moves, relative. */
+  readonly relative: number
   readonly key: string
   readonly input: string
   readonly osmolalityMilliosmPerKg: number

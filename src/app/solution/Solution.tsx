@@ -1,6 +1,7 @@
 import { usePage } from '../state/context.tsx'
 import { solutionView, type HeadlineView } from '../state/solutionView.ts'
 import { Electrolytes } from './Electrolytes.tsx'
+import { Sampling } from './Sampling.tsx'
 import './solution.css'
 
 /** What the solution is: the two numbers that are not the same thing, then everything else. */
@@ -27,6 +28,7 @@ export function Solution() {
       </dl>
       {view.cells !== '' && <p className="solution-sentence">{view.cells}</p>}
       {view.dominated !== '' && <p className="solution-sentence soft small">{view.dominated}</p>}
+      <Sampling />
       <Electrolytes />
     </section>
   )

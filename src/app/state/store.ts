@@ -3,6 +3,7 @@ import type { Evaluation } from '../../evaluation/types.ts'
 import type { Library } from '../../library/library.ts'
 import type { Desk } from './history.ts'
 import type { Autosave } from '../storage/autosave.ts'
+import type { SamplingActions } from '../worker/sampler.ts'
 import type { Actions } from './actions.ts'
 import type { Candidate } from './search.ts'
 
@@ -45,7 +46,7 @@ export type PageStore = StoreApi<PageState>
 /** The state, what can be done to it, and the search over the library. */
 export interface Page {
   readonly store: PageStore
-  readonly actions: Actions & Pick<Autosave, 'keepThis' | 'takeOther'>
+  readonly actions: Actions & Pick<Autosave, 'keepThis' | 'takeOther'> & SamplingActions
   readonly search: (text: string) => readonly Candidate[]
 }
 

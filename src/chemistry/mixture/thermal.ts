@@ -61,6 +61,48 @@ export function mix(
   }
 }
 
+/** The members of a mixture that can be asked again with errors in them. */
+export interface Movable {
+  readonly solutes: readonly Solute[]
+  readonly mixture: Mixture
+  readonly system: ReadySystem
+}
+
+/** Factors near 1 on what a solute's curve, its amount, and the pool's model give. */
+export interface Errors {
+  readonly curve: ReadonlyMap<string, number>
+  readonly amount: ReadonlyMap<string, number>
+  readonly everyAmount: number
+  readonly pool: number
+  /** Share of the pool that each of its members makes. */
+  readonly poolShares: ReadonlyMap<string, number>
+}
+
+/**
+ * Osmolality of the mixture with errors in curves, amounts and model, at the proportions of species that it has. Not a
+ * number when it does not converge.
+ */
+export function osmolalityWithErrors({ solutes, mixture, system }: Movable, errors: Errors): number {
+  const amountOf = (key: string) => errors.everyAmount * (errors.amount.get(key) ?? 1)
+  const members: Member[] = []
+  for (const solute of solutes) {
+    if (solute.kind === 'pool' || solute.molality <= 0) continue
+    const curve = ownCurve(solute, system.slope, Math.max(0, mixture.celsius))
+    const molality = solute.molality * amountOf(solute.key)
+    const factor = errors.curve.get(solute.key) ?? 1
+    members.push({ shareAt: (osmolality) => molality / curve.molalityAt(osmolality / factor) })
+  }
+  if (mixture.pool.isPresent) {
+    const pool = poolMember(mixture.pool, system)
+    let amount = errors.everyAmount
+    for (const [key, share] of errors.poolShares)
+      amount += errors.everyAmount * share * ((errors.amount.get(key) ?? 1) - 1)
+    members.push({ shareAt: (osmolality) => amount * pool.shareAt(osmolality / errors.pool) })
+  }
+  const blended = blend(members, mixture.osmolalityOsmPerKg)
+  return blended.status === 'blended' ? blended.osmolalityOsmPerKg : Number.NaN
+}
+
 function ownCurve(solute: Exclude<Solute, { kind: 'pool' }>, slope: number, celsius: number): OsmoticCurve {
   return solute.kind === 'molecule' ? neutralCurve(solute.curve, celsius) : curveOf(solute.table, slope)
 }

@@ -21,6 +21,8 @@ export function uncertaintyParts(
   if (mixture.poolShare > 0 && mixture.pool.isPresent) {
     const relative = system.activity.relativeUncertainty(mixture.pool.molalities)
     parts.push({
+      kind: 'pool',
+      relative,
       key: '',
       input: 'ion-interaction model',
       osmolalityMilliosmPerKg: total * mixture.poolShare * relative,
@@ -32,12 +34,16 @@ export function uncertaintyParts(
     if (!share || relative === null) continue
     const input = `osmotic curve of ${solute.ingredient.name}`
     parts.push({
+      kind: 'curve',
+      relative,
       key: solute.key,
       input,
       osmolalityMilliosmPerKg: share.osmolalityOsmPerKg * 1000 * relative,
     })
   }
   parts.push({
+    kind: 'every-amount',
+    relative: water.relativeUncertainty,
     key: '',
     input: 'water per litre',
     osmolalityMilliosmPerKg: total * water.relativeUncertainty,

@@ -42,11 +42,15 @@ export function preparationParts(
   const weighing = lines
     .filter(({ grams }) => step > 0 && grams > 0)
     .map(({ key, name, grams, osmolalityMilliosmPerKg }) => ({
+      kind: 'amount' as const,
+      relative: step / grams,
       key,
       input: `weighing of ${name}`,
       osmolalityMilliosmPerKg: (osmolalityMilliosmPerKg * step) / grams,
     }))
   const filling = {
+    kind: 'every-amount' as const,
+    relative: volumeRelativeUncertainty,
     key: '',
     input: 'final volume',
     osmolalityMilliosmPerKg: total * volumeRelativeUncertainty,
