@@ -2,6 +2,9 @@ import { fileURLToPath } from 'node:url'
 import react from '@vitejs/plugin-react'
 import type { Plugin } from 'vite'
 import { defineConfig } from 'vitest/config'
+import { firstLoadBudget } from './.run/page/firstLoad.ts'
+import { offlineCopy } from './.run/page/offlineCopy.ts'
+import { pageAsOneFile } from './.run/page/singleFile.ts'
 
 const repository = fileURLToPath(new URL('.', import.meta.url))
 
@@ -39,7 +42,13 @@ export default defineConfig({
   base: './',
   publicDir: '../public',
   cacheDir: '../.cache/vite',
-  plugins: [react(), policyInPage()],
+  plugins: [
+    react(),
+    policyInPage(),
+    firstLoadBudget(),
+    offlineCopy(`${repository}src/app/offline/service-worker.ts`),
+    pageAsOneFile(),
+  ],
   build: {
     outDir: '../dist',
     emptyOutDir: true,
@@ -70,5 +79,9 @@ export default defineConfig({
     root: repository,
     include: ['tests/**/*.test.ts', 'tests/**/*.test.tsx'],
     environment: 'node',
+    // The rooms are pure, so test files share one copy of the library in each thread.
+    pool: 'threads',
+    isolate: false,
+    testTimeout: 20_000,
   },
 })

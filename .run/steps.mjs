@@ -58,7 +58,7 @@ function* filesBelow(folder) {
 /** A mark that changes when any source, datum or setting of the build changes. */
 export function sourceMark() {
   const hash = createHash('sha256')
-  for (const folder of ['src', 'data', 'public']) {
+  for (const folder of ['src', 'data', 'public', '.run/page']) {
     for (const path of [...filesBelow(join(root, folder))].sort()) {
       const { mtimeMs, size } = statSync(path)
       hash.update(`${path}\n${mtimeMs}\n${size}\n`)

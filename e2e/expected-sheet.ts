@@ -4,20 +4,19 @@ import { readFormulaText } from '../src/formula/document.ts'
 import { loadLibrary } from '../src/library/library.ts'
 import { answer } from '../src/worksheet/answer.ts'
 import { buildWorksheet } from '../src/worksheet/build.ts'
+import { usualDocuments } from '../src/worksheet/kinds.ts'
+import { documentIds } from '../src/worksheet/types.ts'
 
-/* Prints what the sheet of a formula file must say: every string of the model, and the headless answer beside it. */
+/*
+ * Prints what the documents of a formula file must say, and the headless answer beside them. After the file, the ids
+ * of the documents; without any, the usual ones.
+ */
 
-const [file = ''] = process.argv.slice(2)
+const [file = '', ...ids] = process.argv.slice(2)
 const read = readFormulaText(readFileSync(file, 'utf8'))
 if (!read.ok) throw new Error(read.refusal.message)
 const library = loadLibrary()
 const evaluation = evaluate(read.formula, library)
-
-function stringsOf(value: unknown): readonly string[] {
-  if (typeof value === 'string') return [value]
-  if (typeof value !== 'object' || value === null) return []
-  return Object.values(value).flatMap(stringsOf)
-}
-
-const sheet = buildWorksheet(evaluation, library, 'A4')
-process.stdout.write(JSON.stringify({ strings: stringsOf(sheet), answer: answer(evaluation, library) }))
+const wanted = ids.length === 0 ? usualDocuments : documentIds.filter((id) => ids.includes(id))
+const { documents } = buildWorksheet(evaluation, library, 'A4', wanted)
+process.stdout.write(JSON.stringify({ documents, answer: answer(evaluation, library) }))

@@ -19,6 +19,7 @@ export default defineConfig({
     browserName: 'chromium',
     locale: 'en-GB',
     viewport: { width: 1280, height: 900 },
+    serviceWorkers: 'block',
     launchOptions: {
       executablePath: process.env['CHROMIUM_PATH'] ?? '/usr/bin/chromium',
       args: [

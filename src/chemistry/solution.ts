@@ -1,15 +1,24 @@
 import { loadConventions } from '../library/conventions.ts'
 import type { NeutralCurve } from '../library/curves.ts'
 import { loadEstimates } from '../library/estimates.ts'
+import type { Ingredient } from '../library/types.ts'
 import { debyeHueckelSlope } from './activity/debye-hueckel.ts'
 import { osmolalityAtOwnFreezing } from './activity/freezing.ts'
 import { kgPerMolWater } from './activity/model.ts'
 import { sodiumChlorideOsmolality } from './activity/sodium-chloride.ts'
 import { mix, type Mixture, type Movable } from './mixture/thermal.ts'
 import { problemsOf } from './mixture/problems.ts'
-import { apparentCount, formalCount, sharesOf } from './mixture/shares.ts'
-import { isProblem, soluteOf, type Solute } from './mixture/solutes.ts'
-import { contentsOf, systemAt, type Contents, type ReadySystem, type SystemParts } from './mixture/system.ts'
+import { apparentCount, sharesOf } from './mixture/shares.ts'
+import type { SoluteFacts } from './mixture/facts.ts'
+import { factsOf, isProblem, soluteOf, type Solute, type SoluteParts } from './mixture/solutes.ts'
+import {
+  contentsOf,
+  contentsWith,
+  systemAt,
+  type Contents,
+  type ReadySystem,
+  type SystemParts,
+} from './mixture/system.ts'
 import { soluteTotals, type SoluteTotals } from './mixture/totals.ts'
 import { uncertaintyParts } from './mixture/uncertainty.ts'
 import { impliedIons, pHIsKnown } from './mixture/acidity.ts'
@@ -39,7 +48,7 @@ const celsiusOf: Readonly<Record<Temperature, number>> = { freezing: 0, '5': 5, 
 const everyTemperature: readonly Temperature[] = ['freezing', '5', '25', '37']
 
 /** What one solve carries from step to step. */
-interface Work {
+export interface Work {
   readonly composition: Composition
   readonly parts: ChemistryParts
   readonly water: Water
@@ -69,8 +78,8 @@ export function solveSolution(
   for (const temperature of options.temperatures ?? everyTemperature) {
     const outcome =
       temperature === 'freezing'
-        ? solveFreezing(condition.totals, work)
-        : solveAt(celsiusOf[temperature], condition.totals, work)
+        ? solveFreezing(condition, work)
+        : solveAt(celsiusOf[temperature], condition, work)
     if ('status' in outcome) return refused([failureProblem(outcome, work)])
     solved.set(temperature, outcome)
   }
@@ -78,13 +87,13 @@ export function solveSolution(
   return state ?? refused([{ code: 'mixture-not-converged', values: {}, keys: [], fatal: true }])
 }
 
-interface Prepared {
+export interface Prepared {
   readonly work: Work
-  readonly condition: Extract<Condition, { status: 'ready' }>
+  readonly condition: ReadyCondition
 }
 
 /** Water, the sorted solutes and the proton condition: what all temperatures share. */
-function prepare(
+export function prepare(
   composition: Composition,
   parts: ChemistryParts,
 ): Prepared | { readonly problems: readonly ChemistryProblem[] } {
@@ -97,8 +106,8 @@ function prepare(
     parts,
     water,
     solutes,
-    contents: contentsOf(solutes, parts.species),
-    totals: soluteTotals(solutes, parts.species),
+    contents: contentsOf(solutes, parts),
+    totals: soluteTotals(solutes),
   }
   const condition = conditionOf(work)
   return condition.status === 'ready'
@@ -111,13 +120,13 @@ export function movableMixture(composition: Composition, parts: ChemistryParts):
   const prepared = prepare(composition, parts)
   if ('problems' in prepared) return null
   const { work, condition } = prepared
-  const cold = solveAt(celsiusOf.freezing, condition.totals, work)
+  const cold = solveAt(celsiusOf.freezing, condition, work)
   return 'status' in cold ? null : { solutes: work.solutes, ...cold }
 }
 
 const refused = (problems: readonly ChemistryProblem[]): SolutionResult => ({ status: 'refused', problems })
 
-const failureProblem = ({ code, values }: SpeciationFailure, { solutes }: Work): ChemistryProblem => ({
+export const failureProblem = ({ code, values }: SpeciationFailure, { solutes }: Work): ChemistryProblem => ({
   code,
   values,
   keys: solutes.map(({ key }) => key),
@@ -125,40 +134,72 @@ const failureProblem = ({ code, values }: SpeciationFailure, { solutes }: Work):
 })
 
 function sortSolutes(composition: Composition, water: Water, parts: ChemistryParts) {
-  const slope = debyeHueckelSlope(celsiusOf.freezing)
-  const known = {
-    ...parts,
-    conventions: loadConventions(),
-    estimates: loadEstimates(),
-    sodiumChloride: sodiumChlorideOsmolality(parts),
-    slope,
-  }
+  const known = knownOf(parts)
   const solutes: Solute[] = []
   const problems: ChemistryProblem[] = []
   for (const item of composition.dissolved) {
     const molality = water.molality.get(item.key) ?? 0
     if (molality <= 0 || item.ingredient.roles.includes('vehicle')) continue
     const grams = molality * water.kgPerLitre * (item.ingredient.molarMass?.value ?? 1)
-    const solute = soluteOf(item, molality, grams / 10, known)
+    const solute = soluteOf(item, molality, grams / 10, factsIn(known, item.ingredient), known.parts)
     if (isProblem(solute)) problems.push(solute)
     else solutes.push(solute)
   }
   return { solutes, problems }
 }
 
-type Condition =
-  | {
-      readonly status: 'ready'
-      readonly totals: Readonly<Record<string, number>>
-      readonly implied: Speciated | null
-    }
-  | { readonly status: 'failed'; readonly failure: SpeciationFailure }
+/** The data with what was made of each ingredient from them. */
+interface Known {
+  readonly parts: SoluteParts
+  readonly facts: WeakMap<Ingredient, SoluteFacts>
+  seen: number
+}
+
+/* It follows from data and ingredient alone, so that no answer hangs on what was asked before. */
+const kept = new WeakMap<ChemistryParts, Known>()
+
+function knownOf(parts: ChemistryParts): Known {
+  const known = kept.get(parts)
+  if (known) return known
+  const { species, electrolytes, curves } = parts
+  const soluteParts = {
+    species,
+    electrolytes,
+    curves,
+    conventions: loadConventions(),
+    estimates: loadEstimates(),
+    sodiumChloride: sodiumChlorideOsmolality(parts),
+    slope: debyeHueckelSlope(celsiusOf.freezing),
+  }
+  const made = { parts: soluteParts, facts: new WeakMap<Ingredient, SoluteFacts>(), seen: 0 }
+  kept.set(parts, made)
+  return made
+}
+
+function factsIn(known: Known, ingredient: Ingredient): SoluteFacts {
+  const earlier = known.facts.get(ingredient)
+  if (earlier) return earlier
+  known.seen += 1
+  const made = factsOf(ingredient, known.parts, known.seen)
+  known.facts.set(ingredient, made)
+  return made
+}
+
+interface ReadyCondition {
+  readonly status: 'ready'
+  readonly totals: Readonly<Record<string, number>>
+  /** With the ions of an implied adjuster. */
+  readonly contents: Contents
+  readonly implied: Speciated | null
+}
+
+type Condition = ReadyCondition | { readonly status: 'failed'; readonly failure: SpeciationFailure }
 
 /** Where a pH is given, the acid or base that it implies joins the totals, so that the other temperatures follow. */
 function conditionOf(work: Work): Condition {
   const { composition, contents, parts, totals } = work
   if (composition.pH === 'solve') {
-    if (totals.charge === 0) return { status: 'ready', totals: totals.all, implied: null }
+    if (totals.charge === 0) return { status: 'ready', totals: totals.all, contents, implied: null }
     const values = { millimolesPerKg: 1000 * totals.charge }
     return { status: 'failed', failure: { status: 'impossible', code: 'released-ions-unbalanced', values } }
   }
@@ -166,19 +207,19 @@ function conditionOf(work: Work): Condition {
   if (!('activity' in system)) return { status: 'failed', failure: system }
   const answer = system.speciation.solve(totals.all, { kind: 'pH', pH: composition.pH })
   if (answer.status !== 'converged') return { status: 'failed', failure: answer }
-  return { status: 'ready', totals: impliedIons(totals.all, answer), implied: answer }
+  const all = impliedIons(totals.all, answer)
+  return { status: 'ready', totals: all, contents: contentsWith(contents, all), implied: answer }
 }
 
 const neutral: ProtonCondition = { kind: 'electroneutral' }
 
 function solveAt(
   celsius: number,
-  totals: Readonly<Record<string, number>>,
+  { totals, contents }: ReadyCondition,
   work: Work,
 ): Solved | SpeciationFailure {
-  const { contents, parts, solutes } = work
-  const withAdjuster = contentsWith(contents, totals)
-  const system = systemAt(withAdjuster, celsius, parts)
+  const { parts, solutes } = work
+  const system = systemAt(contents, celsius, parts)
   if (!('activity' in system)) return system
   const speciated = system.speciation.solve(totals, neutral)
   if (speciated.status !== 'converged') return speciated
@@ -195,13 +236,13 @@ const belowZero = -5
  * 0.5 osmol/kg on, the osmolality is carried on linearly from 0 and −5 °C to where ice is in equilibrium. A solution
  * that freezes deeper than the ice relation reaches keeps its state at 0 °C and has no reading.
  */
-function solveFreezing(totals: Readonly<Record<string, number>>, work: Work): Solved | SpeciationFailure {
-  const atZero = solveAt(celsiusOf.freezing, totals, work)
+function solveFreezing(condition: ReadyCondition, work: Work): Solved | SpeciationFailure {
+  const atZero = solveAt(celsiusOf.freezing, condition, work)
   if ('status' in atZero) return atZero
   const { osmolalityOsmPerKg: zero } = atZero.mixture
   const weight = Math.min(1, Math.max(0, (zero - 0.5) / 0.3))
   if (weight === 0) return atZero
-  const below = solveAt(belowZero, totals, work)
+  const below = solveAt(belowZero, condition, work)
   if ('status' in below) return below
   const slope = ((below.mixture.osmolalityOsmPerKg - zero) / belowZero) * weight
   const osmolality = osmolalityAtOwnFreezing(zero, slope)
@@ -209,17 +250,6 @@ function solveFreezing(totals: Readonly<Record<string, number>>, work: Work): So
     return { status: 'not-converged', code: 'freezes-too-deep', values: { osmolality: zero } }
   const { kelvin, osmolalityOsmPerKg } = osmolality
   return { ...atZero, mixture: { ...atZero.mixture, osmolalityOsmPerKg, celsius: -kelvin } }
-}
-
-/** The ions of an implied adjuster may be new to the contents. */
-function contentsWith(contents: Contents, totals: Readonly<Record<string, number>>): Contents {
-  const own = new Set(contents.background.map(({ id }) => id))
-  const more = Object.keys(totals).filter(
-    (component) => !own.has(component) && !contents.components.includes(component),
-  )
-  if (more.length === 0) return contents
-  const components = [...contents.components, ...more].toSorted()
-  return { ...contents, components, key: `${more.join(' ')}+${contents.key}` }
 }
 
 function stateOf(
@@ -233,7 +263,11 @@ function stateOf(
   const { water, solutes, composition } = work
   const pHKnown = composition.pH !== 'solve' || pHIsKnown(solutes)
   const shares = sharesOf(solutes, cold.mixture, cold.system)
-  const at = (temperature: Temperature) => thermalState(solved.get(temperature) ?? cold, solutes, pHKnown)
+  const freezing = thermalState(cold, solutes, pHKnown)
+  const at = (temperature: Temperature) => {
+    const own = solved.get(temperature)
+    return own && own !== cold ? thermalState(own, solutes, pHKnown) : freezing
+  }
   const state: SolutionState = {
     waterKgPerLitre: water.kgPerLitre,
     waterUncertainty: water.relativeUncertainty,
@@ -254,13 +288,15 @@ function thermalState(
   pHKnown: boolean,
 ): ThermalState {
   const { speciated, pool, osmolalityOsmPerKg } = mixture
-  const outside = solutes.reduce((sum, solute) => {
-    if (solute.kind === 'pool') return sum
-    return sum + solute.molality * (formalCount(solute) ?? apparentCount(solute))
-  }, 0)
-  const particles = pool.sumOfMolalities + outside
-  const byId = (values: Float64Array, of: (value: number) => number) =>
-    Object.fromEntries(system.speciation.species.map(({ id }, index) => [id, of(values[index] ?? 0)]))
+  let particles = pool.sumOfMolalities
+  for (const solute of solutes) {
+    if (solute.kind !== 'pool')
+      particles += solute.molality * (solute.facts.formalCount ?? apparentCount(solute))
+  }
+  const { species } = system.speciation
+  const { molalities, lnGamma } = speciated
+  let bySpecies: Readonly<Record<string, number>> | undefined
+  let coefficients: Readonly<Record<string, number>> | undefined
   return {
     celsius: mixture.celsius,
     osmolalityOsmPerKg,
@@ -268,7 +304,21 @@ function thermalState(
     osmoticCoefficient: particles === 0 ? 1 : osmolalityOsmPerKg / particles,
     ionicStrength: speciated.ionicStrength,
     pH: pHKnown ? speciated.pH : null,
-    species: byId(speciated.molalities, (value) => value),
-    activityCoefficients: byId(speciated.lnGamma, Math.exp),
+    // Made when they are read: of most solutions only the osmolality is.
+    get species() {
+      return (bySpecies ??= recordOf(species, (index) => molalities[index] ?? 0))
+    },
+    get activityCoefficients() {
+      return (coefficients ??= recordOf(species, (index) => Math.exp(lnGamma[index] ?? 0)))
+    },
   }
+}
+
+function recordOf(
+  species: readonly { readonly id: string }[],
+  valueAt: (index: number) => number,
+): Readonly<Record<string, number>> {
+  const record: Record<string, number> = {}
+  for (const [index, { id }] of species.entries()) record[id] = valueAt(index)
+  return record
 }

@@ -9,6 +9,7 @@ import { portionsOf } from './model.ts'
 import { remarksOn } from './remarks/remarks.ts'
 import type { Evaluation, Finding, LineAnswer, MethodAnswer, SolutionAnswer } from './types.ts'
 import { aliquotsOf } from './weighing/aliquots.ts'
+import { weighingPlanOf } from './weighing/plan.ts'
 import { weighingTrace } from './weighingTrace.ts'
 
 export interface Question {
@@ -47,7 +48,8 @@ export function assembled(question: Question, answered: Answered): Evaluation {
     lines,
     adjuster,
     electrolytes,
-    aliquots: aliquotsOf(lines, plan.balance, volumeMl),
+    aliquots: aliquotsOf(lowered, batchFactor),
+    weighingPlan: weighingPlanOf(plan, lowered, uncertainty, formula),
     uncertainty,
     routeSpan: null,
     trace: weighingTrace(plan, lowered),

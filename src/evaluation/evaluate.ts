@@ -1,7 +1,7 @@
 import { loadConventions } from '../library/conventions.ts'
 import type { Library } from '../library/library.ts'
 import type { Formula } from '../formula/types.ts'
-import { adjust, type Adjusted } from './adjusting/adjust.ts'
+import { fillAndAdjust } from './adjusting/fillAndAdjust.ts'
 import type { Plan } from './adjusting/plan.ts'
 import { surroundingsOf } from './adjusting/surroundings.ts'
 import { nonFinitePath } from './answers/finite.ts'
@@ -48,6 +48,9 @@ function answered(formula: Formula, library: Library): Evaluation {
 function orderRemarks(formula: Formula, lines: readonly ReadLine[], library: Library): Finding[] {
   const adjusters = lines.filter(({ part }) => part === 'adjuster')
   if (formula.lines.length === 0) return [findingOf(library, 'no-ingredients', { blocks: true })]
+  const fills = new Set(lines.flatMap(({ part, stock }) => (part === 'fill' && stock ? [stock.lineKey] : [])))
+  if (fills.size > 1)
+    return [findingOf(library, 'several-vehicles-fill', { lineKeys: [...fills], blocks: true })]
   if (adjusters.length === 0 || formula.target) return []
   return [
     findingOf(library, 'target-missing', {
@@ -67,7 +70,7 @@ function planOf(
   lines: readonly ReadLine[],
 ): Plan {
   const conventions = loadConventions()
-  const { readabilityG, batchFactor, temperatureCelsius, target } = order
+  const { scales, measures, batchFactor, temperatureCelsius, target } = order
   return {
     library,
     conventions,
@@ -75,11 +78,8 @@ function planOf(
     setting: { volumeMl, temperatureCelsius, pH: formula.pH ?? 'solve' },
     solutes: lines.filter(({ part }) => part === 'solute'),
     adjusters: lines.filter(({ part }) => part === 'adjuster'),
-    balance: {
-      readabilityG,
-      leastWeighableG: (readabilityG ?? 0) * conventions.leastWeighableReadabilities.value,
-      batchFactor,
-    },
+    fills: lines.filter(({ part }) => part === 'fill'),
+    balance: { scales, measures, batchFactor, batchVolumeMl: volumeMl * batchFactor },
     target,
   }
 }
@@ -97,26 +97,17 @@ function solved(formula: Formula, plan: Plan, standing: Standing, findings: Find
   }
   const known = { ...standing, lowered }
   if (findings.some(({ blocks }) => blocks)) return blockedEvaluation(formula, library, known, findings)
-  const adjusted = adjustedOn(lowered, plan)
+  const { adjusted, ...filledUp } = fillAndAdjust(lowered, plan)
   if (adjusted?.modelRefused)
     return evaluateByEquivalents(formula, plan, known, findings, { sizing: adjusted })
-  findings.push(...(adjusted?.findings ?? []))
-  const complete = {
-    ...known,
-    lowered: [...lowered, ...(adjusted?.lowered ?? [])],
-    adjuster: adjusted?.answer ?? null,
-  }
+  findings.push(...(adjusted?.findings ?? []), ...filledUp.findings)
+  const complete = { ...known, lowered: filledUp.lowered, adjuster: adjusted?.answer ?? null }
   if (findings.some(({ blocks }) => blocks)) return blockedEvaluation(formula, library, complete, findings)
   const result = solve(portionsOf(plan, complete.lowered), setting, library)
   if (result.status === 'refused')
     return evaluateByEquivalents(formula, plan, complete, findings, { problems: result.problems })
   findings.push(...problemFindings(result.state.problems, standing.read, library, false))
   return finish(formula, plan, complete, findings, result.state)
-}
-
-function adjustedOn(lowered: readonly Lowered[], plan: Plan): Adjusted | null {
-  if (plan.adjusters.length === 0 || !plan.target) return null
-  return adjust(portionsOf(plan, lowered), plan.target, plan)
 }
 
 /** The last check: a number that is not finite leaves as a named block, never as a number. */

@@ -1,4 +1,5 @@
 import type { Library } from '../library/library.ts'
+import { lineKeyOf } from './stocks/keys.ts'
 import type { Finding, Severity } from './types.ts'
 
 export interface About {
@@ -30,6 +31,6 @@ const rank: Readonly<Record<Severity, number>> = { stop: 0, warn: 1, note: 2 }
 export function inOrder(findings: readonly Finding[], lineKeys: readonly string[]): readonly Finding[] {
   const place = new Map(lineKeys.map((key, index) => [key, index]))
   const placeOf = ({ lineKeys: [first] }: Finding) =>
-    first === undefined ? lineKeys.length : (place.get(first) ?? lineKeys.length)
+    first === undefined ? lineKeys.length : (place.get(lineKeyOf(first)) ?? lineKeys.length)
   return findings.toSorted((a, b) => rank[a.severity] - rank[b.severity] || placeOf(a) - placeOf(b))
 }

@@ -7,10 +7,12 @@ import { bareLine, withShares } from './answers/lines.ts'
 import { solutionAnswer } from './answers/solution.ts'
 import { assembled } from './assembled.ts'
 import type { Standing } from './blocked.ts'
+import type { Lowered } from './lowering.ts'
 import { additiveAnswer, additiveMethods, type MethodInput } from './methods/answer.ts'
 import { electrolyteAnswer } from './methods/electrolyte.ts'
 import type { MethodSizing } from './methods/adjust.ts'
 import { portionsOf, quick, readingOf, solve, type Portion } from './model.ts'
+import { standardErrorOf } from './weighing/errors.ts'
 import type { AdjusterAnswer, Evaluation, Finding, LineAnswer } from './types.ts'
 
 /** From the solved solution to the whole answer, headline by the electrolyte model. */
@@ -30,7 +32,7 @@ export function finish(
     state,
     reading,
   )
-  const parts = [...state.uncertainty, ...partsOf(lines, plan)].toSorted(
+  const parts = [...state.uncertainty, ...partsOf(lines, lowered, plan)].toSorted(
     (a, b) => b.osmolalityMilliosmPerKg - a.osmolalityMilliosmPerKg,
   )
   const solution = solutionAnswer(state, portions, parts, plan)
@@ -47,17 +49,25 @@ export function finish(
   )
 }
 
-function partsOf(lines: readonly LineAnswer[], plan: Plan) {
+function partsOf(lines: readonly LineAnswer[], lowered: readonly Lowered[], plan: Plan) {
+  const masses = new Map(lowered.map((line) => [line.key, line]))
   const weighed = lines.flatMap(({ key, ingredient, grams, osmolalityShareMilliosmPerKg }) =>
     grams === null || osmolalityShareMilliosmPerKg === null
       ? []
-      : [{ key, name: ingredient.name, grams, osmolalityMilliosmPerKg: osmolalityShareMilliosmPerKg }],
+      : [
+          {
+            key,
+            name: ingredient.name,
+            grams,
+            osmolalityMilliosmPerKg: osmolalityShareMilliosmPerKg,
+            ...standardErrorOf(masses.get(key), plan.balance.batchFactor),
+          },
+        ],
   )
-  const { readabilityG, batchFactor } = plan.balance
   return preparationParts(
     weighed,
-    readabilityG,
-    batchFactor,
+    null,
+    plan.balance.batchFactor,
     plan.conventions.finalVolumeRelativeUncertainty.value,
   )
 }

@@ -1,11 +1,19 @@
 import type { Amount } from '../quantity/amount.ts'
 import { resolveAmount } from '../quantity/resolveAmount.ts'
 import { roundToReadability } from '../quantity/readability.ts'
+import { loadDeviceData } from '../library/devices.ts'
 import type { Library } from '../library/library.ts'
+import type { FormFactor } from '../library/forms.ts'
 import type { Ingredient } from '../library/types.ts'
 import { findingOf } from './finding.ts'
+import type { Certified } from './forms/certificate.ts'
 import { factsOf } from './order/facts.ts'
+import type { StockShare } from './stocks/stock.ts'
+import { stockVolume } from './stocks/readStock.ts'
 import type { Finding } from './types.ts'
+import { designAliquot, type AliquotPlan } from './weighing/aliquot.ts'
+import { measureFor, measureOf, type Measure, type Measured } from './weighing/measures.ts'
+import { chooseScale, isBelowLeast, isDiluted, type Scale } from './weighing/scales.ts'
 
 /** A line whose words were understood. */
 export interface ReadLine {
@@ -13,10 +21,15 @@ export interface ReadLine {
   readonly ingredient: Ingredient
   readonly amount: Amount
   /** What the line is in the work: put into the solution, sized to the target, or the water around it. */
-  readonly part: 'solute' | 'adjuster' | 'vehicle'
+  readonly part: 'solute' | 'adjuster' | 'vehicle' | 'fill'
   readonly share: number
   /** Largest mass of an adjuster in the evaluated volume, g. */
   readonly capGrams: number | null
+  /** What the amount means, where it is not the article. */
+  readonly ordered?: FormFactor
+  readonly certified?: Certified
+  /** Measured as a solution from the shelf. */
+  readonly stock?: StockShare
 }
 
 /** Masses of the pure substance in the evaluated volume. */
@@ -29,6 +42,14 @@ export interface Lowered {
   readonly millilitres: number | null
   readonly belowLeastWeighable: boolean
   readonly belowReadability: boolean
+  /** The balance that was chosen; absent: nothing is rounded, or measured by volume. */
+  readonly scale?: Scale
+  /** Too small to be weighed as such: to be diluted or triturated. */
+  readonly isDiluted?: boolean
+  /** The dilution by which a mass below the least weighable one is measured. */
+  readonly aliquot?: AliquotPlan
+  /** The measure that was chosen; null where the bench has none for this volume. */
+  readonly measured?: Measured | null
 }
 
 /** What the solution is like, for amounts that are written against it. */
@@ -38,11 +59,14 @@ export interface Surroundings {
   readonly densityGPerMl: number
 }
 
+/** What there is to weigh and to measure with. */
 export interface Balance {
-  /** g; null: nothing is rounded. */
-  readonly readabilityG: number | null
-  readonly leastWeighableG: number
+  /** Empty: nothing is rounded. */
+  readonly scales: readonly Scale[]
+  /** Measures of one's own; empty: volumes are not rounded and aliquots are designed for class A glassware. */
+  readonly measures: readonly Measure[]
   readonly batchFactor: number
+  readonly batchVolumeMl: number
 }
 
 /** Its mass follows from the finished solution, which must be known first. */
@@ -56,20 +80,38 @@ export function lower(
   balance: Balance,
   library: Library,
 ): Lowered | Finding {
-  const { ingredient, amount, key } = line
-  const resolved = resolveAmount(amount, factsOf(ingredient, around.densityGPerMl), around.volumeMl)
-  if (!resolved.ok) {
-    const { message, wayOut } = resolved.refusal
-    return findingOf(library, 'amount-unusable', {
-      values: { ingredient: ingredient.name, text: amount.text, reason: message, instead: wayOut },
-      ingredients: [ingredient.id],
-      lineKeys: [key],
-      blocks: true,
-    })
-  }
+  const { ingredient, amount } = line
+  if (line.stock) return measuredStock(line, around, balance, library)
+  const resolved = resolveAmount(amount, factsOf(ingredient, around.densityGPerMl, line), around.volumeMl)
+  if (!resolved.ok) return unusable(line, resolved.refusal.message, resolved.refusal.wayOut, library)
   const { grams, molPerKg = 0, millilitres } = resolved.value
-  const exact = grams ?? molPerKg * (ingredient.molarMass?.value ?? Number.NaN) * around.waterKg
-  return isByVolume(line) ? poured(line, exact, millilitres ?? null) : weighed(line, exact, balance)
+  const ordered = grams ?? molPerKg * orderedMolarMass(line) * around.waterKg
+  const exact = ordered * (line.ordered?.factor ?? 1)
+  return isByVolume(line) ? poured(line, exact, millilitres ?? null, balance) : weighed(line, exact, balance)
+}
+
+const orderedMolarMass = ({ ordered, ingredient }: ReadLine): number =>
+  ordered?.orderedMolarMass ?? ingredient.molarMass?.value ?? Number.NaN
+
+const unusable = (line: ReadLine, reason: string, instead: string, library: Library): Finding =>
+  findingOf(library, 'amount-unusable', {
+    values: { ingredient: line.ingredient.name, text: line.amount.text, reason, instead },
+    ingredients: [line.ingredient.id],
+    lineKeys: [line.key],
+    blocks: true,
+  })
+
+/** One ingredient of a stock: the volume of the stock decides its mass. */
+function measuredStock(
+  line: ReadLine,
+  around: Surroundings,
+  balance: Balance,
+  library: Library,
+): Lowered | Finding {
+  const volume = stockVolume(line, around, library)
+  if (!volume.ok) return unusable(line, volume.reason, volume.instead, library)
+  const grams = volume.millilitres * (line.stock?.gramsPerMl ?? 0)
+  return { ...poured(line, grams, volume.millilitres, balance), articleGrams: null }
 }
 
 export const isFinding = (result: Lowered | Finding): result is Finding => 'code' in result
@@ -80,44 +122,97 @@ function isByVolume({ amount, ingredient }: ReadLine): boolean {
   return ingredient.percentBasis === 'v/v' && (amount.kind === 'percent' || amount.kind === 'ratio')
 }
 
-function poured({ key, ingredient }: ReadLine, grams: number, millilitres: number | null): Lowered {
+function poured(
+  line: ReadLine,
+  exact: number,
+  exactMl: number | null,
+  { measures, batchFactor }: Balance,
+): Lowered {
+  const measured =
+    exactMl === null || measures.length === 0 ? undefined : measureFor(exactMl * batchFactor, measures)
+  const millilitres = measured ? measured.millilitres / batchFactor : exactMl
+  const grams = measured && exactMl ? exact * (measured.millilitres / (exactMl * batchFactor)) : exact
   return {
-    key,
-    gramsExact: grams,
+    key: line.key,
+    gramsExact: exact,
     grams,
-    articleGrams: articleMass(ingredient, grams),
+    articleGrams: articleMass(line, grams),
     millilitres,
     belowLeastWeighable: false,
     belowReadability: false,
+    ...(measured === undefined ? {} : { measured }),
   }
 }
 
-const articleMass = ({ article }: Ingredient, grams: number): number | null =>
-  article ? grams / article.massFraction.value : null
+/** Share of the named substance in what lies on the shelf; null where that is the pure substance. */
+function contentOfArticle({
+  ingredient,
+  certified,
+}: Pick<ReadLine, 'ingredient' | 'certified'>): number | null {
+  if (!ingredient.article && !certified) return null
+  return (ingredient.article?.massFraction.value ?? 1) * (certified?.content ?? 1)
+}
+
+function articleMass(line: Pick<ReadLine, 'ingredient' | 'certified'>, grams: number): number | null {
+  const content = contentOfArticle(line)
+  return content === null ? null : grams / content
+}
 
 /* A mass that differs from a limit by the noise of its last binary digit is at the limit. */
 const belowAtAll = 1 - 1e-12
 
 /**
- * Rounds what is put on the balance: the batch, and the article where it is not the pure substance. What the
- * balance cannot show stays exact, since it will not be weighed as such.
+ * Rounds what is put on the balance: the batch, and the article where it is not the pure substance. Below the least
+ * weighable mass it is the mass for the dilution that is rounded, and the aliquot of it that is evaluated. What the
+ * balance cannot show and no dilution reaches stays exact, since it will not be weighed as such.
  */
 export function weighed(
-  { key, ingredient }: Pick<ReadLine, 'key' | 'ingredient'>,
+  line: Pick<ReadLine, 'key' | 'ingredient' | 'certified'>,
   gramsExact: number,
-  { readabilityG, leastWeighableG, batchFactor }: Balance,
+  balance: Balance,
 ): Lowered {
-  const exactArticle = articleMass(ingredient, gramsExact)
+  const { batchFactor } = balance
+  const exactArticle = articleMass(line, gramsExact)
   const onBalance = (exactArticle ?? gramsExact) * batchFactor
-  const rounds = readabilityG !== null && onBalance >= readabilityG * belowAtAll && Number.isFinite(onBalance)
-  const rounded = rounds ? roundToReadability(onBalance, readabilityG) / batchFactor : onBalance / batchFactor
+  const isMass = Number.isFinite(onBalance) && onBalance > 0
+  const scale = isMass ? chooseScale(onBalance, balance.scales, loadDeviceData().rules) : null
+  const isBelow = scale !== null && isBelowLeast(onBalance, scale)
+  const diluted = scale !== null && isDiluted(onBalance, scale)
+  const aliquot = scale && diluted ? aliquotFor(onBalance, scale, balance) : null
+  const taken = takenMass(onBalance, scale, aliquot)
+  const rounded = (taken ?? onBalance) / batchFactor
   return {
-    key,
+    key: line.key,
     gramsExact,
-    grams: rounds ? rounded * (ingredient.article?.massFraction.value ?? 1) : gramsExact,
+    grams: taken === null ? gramsExact : rounded * (contentOfArticle(line) ?? 1),
     articleGrams: exactArticle === null ? null : rounded,
     millilitres: null,
-    belowLeastWeighable: readabilityG !== null && onBalance > 0 && onBalance < leastWeighableG * belowAtAll,
-    belowReadability: readabilityG !== null && onBalance > 0 && onBalance < readabilityG * belowAtAll,
+    belowLeastWeighable: isBelow,
+    belowReadability: scale !== null && onBalance < scale.readabilityG * belowAtAll,
+    ...(scale ? { scale } : {}),
+    ...(diluted ? { isDiluted: true } : {}),
+    ...(aliquot ? { aliquot } : {}),
   }
+}
+
+/** What enters the batch; null where nothing rounds it. */
+function takenMass(onBalance: number, scale: Scale | null, aliquot: AliquotPlan | null): number | null {
+  if (aliquot) return aliquot.doseGrams
+  if (!scale || onBalance < scale.readabilityG * belowAtAll) return null
+  return roundToReadability(onBalance, scale.readabilityG)
+}
+
+function aliquotFor(neededGrams: number, scale: Scale, balance: Balance): AliquotPlan | null {
+  const { volumetric, rules } = loadDeviceData()
+  const measures = balance.measures.length > 0 ? balance.measures : volumetric.map(measureOf)
+  return designAliquot(
+    {
+      neededGrams,
+      leastWeighableGrams: scale.dilutedBelowG,
+      weighingErrorGrams: scale.errorG,
+      roomMl: balance.batchVolumeMl * rules.aliquotRoomFraction.value,
+      readabilityGrams: scale.readabilityG,
+    },
+    measures,
+  )
 }

@@ -117,7 +117,7 @@ export function portionsOf(
   lowered: readonly { readonly key: string; readonly grams: number }[],
 ): readonly Portion[] {
   const masses = new Map(lowered.map(({ key, grams }) => [key, grams]))
-  return [...plan.solutes, ...plan.adjusters].flatMap(({ key, ingredient }) => {
+  return [...plan.solutes, ...plan.adjusters, ...plan.fills].flatMap(({ key, ingredient }) => {
     const grams = masses.get(key)
     return grams === undefined ? [] : [{ key, ingredient, grams }]
   })
@@ -126,4 +126,5 @@ export function portionsOf(
 interface Lines {
   readonly solutes: readonly Omit<Portion, 'grams'>[]
   readonly adjusters: readonly Omit<Portion, 'grams'>[]
+  readonly fills: readonly Omit<Portion, 'grams'>[]
 }

@@ -2,7 +2,11 @@ import type { Interval } from '../quantity/interval.ts'
 import type { Amount } from '../quantity/amount.ts'
 import type { Ingredient, SourceKey } from '../library/types.ts'
 import type { Formula } from '../formula/types.ts'
+import type { FormFactor } from '../library/forms.ts'
+import type { Certified } from './forms/certificate.ts'
+import type { StockShare } from './stocks/stock.ts'
 import type { AliquotPlan } from './weighing/aliquot.ts'
+import type { WeighingPlan } from './weighing/plan.ts'
 import type { SolutionState, UncertaintyPart } from '../chemistry/types.ts'
 
 export type Severity = 'stop' | 'warn' | 'note'
@@ -82,6 +86,11 @@ export interface LineAnswer {
   readonly osmolalityShareMilliosmPerKg: number | null
   readonly effectiveOsmolalityShareMilliosmPerKg: number | null
   readonly belowLeastWeighable: boolean
+  /** Measured as a solution from the shelf; its line of the formula is `stock.lineKey`. */
+  readonly stock?: StockShare
+  /** What the amount means, where it is not the article. */
+  readonly ordered?: FormFactor
+  readonly certified?: Certified
 }
 
 export interface SolutionAnswer {
@@ -152,6 +161,8 @@ export interface Evaluation {
   readonly adjuster: AdjusterAnswer | null
   readonly electrolytes: readonly IonAnswer[]
   readonly aliquots: readonly LineAliquot[]
+  /** How each line is weighed or measured, and what the batch is made of; absent while blocked. */
+  readonly weighingPlan?: WeighingPlan
   readonly findings: readonly Finding[]
   readonly uncertainty: readonly UncertaintyPart[]
   readonly routeSpan: {

@@ -10,7 +10,7 @@ interface SetField<Field extends FieldName> {
   readonly value: Formula[Field] | undefined
 }
 
-type LineFieldName = 'share' | 'cap' | 'note'
+type LineFieldName = 'share' | 'cap' | 'note' | 'orderedAs' | 'certificate'
 
 interface SetLineField<Field extends LineFieldName> {
   readonly kind: 'set-line-field'

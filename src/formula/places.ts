@@ -7,6 +7,7 @@ const partWords: Readonly<Record<string, string>> = {
   temperature: 'The temperature',
   lines: 'The list of lines',
   balance: 'The balance',
+  bench: 'The bench',
   batch: 'The batch',
   order: 'The order',
   patient: 'The patient',

@@ -1,6 +1,7 @@
 import * as v from 'valibot'
 import { ingredientSchema } from '../library/schema.ts'
-import { routeIds, targetQuantities } from './types.ts'
+import { stockSchema } from '../library/stocks.ts'
+import { measureKinds, routeIds, targetQuantities } from './types.ts'
 
 /* Shape of the saved document. Messages are the end of a sentence that begins with the place. */
 
@@ -9,6 +10,7 @@ export const longestAmount = 2000
 export const longestText = 500
 export const longestNotes = 20_000
 const mostUnits = 100_000
+const mostStocks = 100
 
 const textUpTo = (most: number) =>
   v.pipe(v.string('has to be text'), v.maxLength(most, `is longer than ${most} characters`))
@@ -42,7 +44,37 @@ const line = objectOf({
   share: v.exactOptional(above0),
   cap: v.exactOptional(amount),
   note: v.exactOptional(text),
+  orderedAs: v.exactOptional(text),
+  certificate: v.exactOptional(
+    objectOf({
+      assayPercent: v.exactOptional(numberFrom(0, 1000)),
+      assayBasis: v.exactOptional(chosenFrom(['as-is', 'anhydrous', 'dried'])),
+      waterPercent: v.exactOptional(numberFrom(0, 100)),
+      unitsPerMg: v.exactOptional(above0),
+    }),
+  ),
 })
+
+const benchBalance = objectOf({
+  name: text,
+  readability: text,
+  repeatability: v.exactOptional(text),
+  sensitivity: v.exactOptional(text),
+  allowedErrorPercent: v.exactOptional(numberFrom(0.01, 100)),
+  capacity: v.exactOptional(text),
+})
+
+const benchMeasure = objectOf({
+  name: text,
+  kind: chosenFrom(measureKinds),
+  capacity: text,
+  graduation: v.exactOptional(text),
+  tolerance: v.exactOptional(text),
+})
+
+const mostDevices = 50
+const devicesOf = <const Item extends v.GenericSchema>(item: Item) =>
+  v.pipe(v.array(item, 'has to be a list'), v.maxLength(mostDevices, `holds more than ${mostDevices}`))
 
 export const formulaSchema = objectOf({
   format: v.literal('evenwater.formula'),
@@ -54,11 +86,26 @@ export const formulaSchema = objectOf({
   pH: v.exactOptional(numberFrom(0, 14)),
   temperature: v.exactOptional(text),
   lines: v.pipe(v.array(line, 'has to be a list'), v.maxLength(mostLines, `holds more than ${mostLines}`)),
+  stocks: v.exactOptional(
+    v.pipe(
+      v.array(stockSchema, 'has to be a list'),
+      v.maxLength(mostStocks, `holds more than ${mostStocks}`),
+    ),
+  ),
   balance: v.exactOptional(text),
+  bench: v.exactOptional(
+    objectOf({
+      balances: v.exactOptional(devicesOf(benchBalance)),
+      measures: v.exactOptional(devicesOf(benchMeasure)),
+    }),
+  ),
   batch: v.exactOptional(
     objectOf({
       units: v.pipe(numberFrom(1, mostUnits), v.integer('has to be a whole number')),
       excess: v.exactOptional(text),
+      overfill: v.exactOptional(chosenFrom(['mobile', 'viscous'])),
+      holdUp: v.exactOptional(text),
+      samples: v.exactOptional(text),
     }),
   ),
   order: v.exactOptional(

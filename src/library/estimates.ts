@@ -22,6 +22,7 @@ const estimatesSchema = v.strictObject({
   temperatureForm: datum,
   outOfRange: datum,
   leastModelUncertainty: datum,
+  measuredReading: datum,
 })
 
 /** What is assumed, with what uncertainty, where nothing was measured. Each use is named in a finding. */

@@ -93,7 +93,9 @@ function bestOf(entry: Entry, typed: readonly string[], text: string): Ingredien
   for (const term of entry.terms) {
     if (term.by === 'role' && text.length < leastRoleLength) continue
     const weight = term.by === 'name' ? 1 : term.by === 'synonym' ? 0.98 : 0.6
-    const score = termFit(typed, term) * weight + (entry.isCommon ? 0.06 : 0)
+    const fit = termFit(typed, term) * weight + (entry.isCommon ? 0.06 : 0)
+    const isWhole = term.by !== 'role' && term.words.join(' ') === typed.join(' ')
+    const score = isWhole ? 1 : Math.min(0.99, fit)
     if (score >= leastScore && score > (best?.score ?? 0)) {
       best = { ingredient, matched: term.text, by: term.by, score: Math.min(1, score) }
     }

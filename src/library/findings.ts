@@ -1,9 +1,12 @@
 import * as v from 'valibot'
 import activity from '../../data/findings/activity.json'
+import buffers from '../../data/findings/buffers.json'
 import cautions from '../../data/findings/cautions.json'
 import chemistry from '../../data/findings/chemistry.json'
 import evaluation from '../../data/findings/evaluation.json'
+import shelf from '../../data/findings/shelf.json'
 import speciation from '../../data/findings/speciation.json'
+import weighing from '../../data/findings/weighing.json'
 import { checked } from './checked.ts'
 import type { SourceKey } from './types.ts'
 
@@ -31,10 +34,13 @@ const findingTextsSchema = v.array(
 /** Each room brings its own words. */
 export const findingFiles: Readonly<Record<string, unknown>> = {
   activity,
+  buffers,
   cautions,
   chemistry,
   evaluation,
+  shelf,
   speciation,
+  weighing,
 }
 
 /** The words of every finding; a code stands once. */

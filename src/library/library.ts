@@ -1,3 +1,4 @@
+import { type BufferSystem, loadBufferSystems, loadRankingRules, type RankingRule } from './buffers.ts'
 import { type Caution, cautionWords, loadCautions } from './cautions.ts'
 import { contentMark } from './content-mark.ts'
 import { libraryContent } from './content.ts'
@@ -6,10 +7,14 @@ import { type ElectrolyteParameters, loadElectrolytes } from './electrolytes.ts'
 import { type Equilibria, loadEquilibria, loadSpecies } from './equilibria.ts'
 import { type Estimates, loadEstimates } from './estimates.ts'
 import { type FindingText, loadFindings } from './findings.ts'
-import { loadIngredients } from './ingredients.ts'
+import type { Moiety } from './forms.ts'
+import { keyed } from './keyed.ts'
+import { loadOpening } from './opening.ts'
 import { type RouteLimits, loadRoutes } from './routes.ts'
+import { type IntrinsicSolubility, loadIntrinsicSolubilities, loadSolids, type Solid } from './solids.ts'
 import { loadSources } from './sources.ts'
 import { loadSteps, type StepRule } from './steps.ts'
+import type { Stock } from './stocks.ts'
 import type { Ingredient, Source, SpeciesRecord } from './types.ts'
 import { loadVehicles, type PublishedVehicle } from './vehicles.ts'
 
@@ -18,6 +23,10 @@ export interface Library {
   /** Mark of the content of all data: the same data, the same mark. */
   readonly version: string
   readonly ingredients: ReadonlyMap<string, Ingredient>
+  /** What an order can mean beside the article: bases, anhydrous salts, elements. */
+  readonly moieties: readonly Moiety[]
+  /** Solutions on the shelf; no id of one is that of an ingredient. */
+  readonly stocks: ReadonlyMap<string, Stock>
   readonly sources: ReadonlyMap<string, Source>
   readonly species: ReadonlyMap<string, SpeciesRecord>
   readonly electrolytes: ElectrolyteParameters
@@ -33,6 +42,12 @@ export interface Library {
   readonly findings: ReadonlyMap<string, FindingText>
   /** Published buffers made to a volume. */
   readonly vehicles: readonly PublishedVehicle[]
+  readonly bufferSystems: readonly BufferSystem[]
+  /** How buffers are put in order. */
+  readonly rankingRules: readonly RankingRule[]
+  /** Solids that can fall out, and what water holds of uncharged acids and bases. */
+  readonly solids: readonly Solid[]
+  readonly intrinsicSolubilities: readonly IntrinsicSolubility[]
   /** Rules of the order of mixing. */
   readonly steps: readonly StepRule[]
 }
@@ -48,7 +63,7 @@ export function loadLibrary(): Library {
 function assemble(): Library {
   return {
     version: contentMark(JSON.stringify(libraryContent())),
-    ingredients: keyed(loadIngredients(), ({ id }) => id),
+    ...loadOpening(),
     sources: loadSources(),
     species: keyed(loadSpecies(), ({ id }) => id),
     electrolytes: loadElectrolytes(),
@@ -60,15 +75,9 @@ function assemble(): Library {
     findings: keyed([...loadFindings(), ...cautionWords()], ({ code }) => code),
     steps: loadSteps(),
     vehicles: loadVehicles(),
+    bufferSystems: loadBufferSystems(),
+    rankingRules: loadRankingRules(),
+    solids: loadSolids(),
+    intrinsicSolubilities: loadIntrinsicSolubilities(),
   }
-}
-
-function keyed<Item>(items: readonly Item[], keyOf: (item: Item) => string): ReadonlyMap<string, Item> {
-  const map = new Map<string, Item>()
-  for (const item of items) {
-    const key = keyOf(item)
-    if (map.has(key)) throw new Error(`${key} stands twice in the data`)
-    map.set(key, item)
-  }
-  return map
 }

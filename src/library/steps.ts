@@ -1,5 +1,9 @@
 import * as v from 'valibot'
+import beyondUse from '../../data/steps/beyond-use.json'
 import raw from '../../data/steps/steps.json'
+import { checked } from './checked.ts'
+
+export const stepFiles: Readonly<Record<string, unknown>> = { steps: raw, 'beyond-use': beyondUse }
 
 const stepRule = v.strictObject({
   id: v.string(),
@@ -21,3 +25,11 @@ export type StepRule = v.InferOutput<typeof stepRule>
 export function loadSteps(): readonly StepRule[] {
   return v.parse(v.array(stepRule), raw).toSorted((first, second) => first.rank - second.rank)
 }
+
+const policyText = v.strictObject({ text: v.string(), source: v.string(), evidence: v.string() })
+const beyondUseTexts = v.strictObject({ sterile: policyText, eye: policyText, nonsterile: policyText })
+
+/** What policies of the trade say about beyond-use dates: orientation, never the date. */
+export type BeyondUseTexts = v.InferOutput<typeof beyondUseTexts>
+
+export const loadBeyondUse = (): BeyondUseTexts => checked(beyondUseTexts, beyondUse, 'steps/beyond-use')

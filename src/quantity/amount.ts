@@ -11,6 +11,8 @@ export type AmountKind =
   | 'moles-per-volume' // mmol per mL
   | 'equivalents-per-volume' // mEq per mL
   | 'moles-per-water-mass' // mol per kg of water
+  | 'units' // units of biological activity in the whole volume
+  | 'units-per-volume' // units per mL
   | 'percent' // bare "1 %": w/v or v/v, decided by the ingredient's percent basis; value is the number before "%"
   | 'ratio' // "1:1000": parts in parts, w/v or v/v by the ingredient; value is the quotient
 

@@ -2,11 +2,11 @@ import type { Read } from './amount.ts'
 import type { Locale } from './locale.ts'
 import {
   multiply,
+  powerOfTen,
   rationalOfNumber,
-  roundToStep,
-  terminatingDecimal,
+  roundedDecimal,
+  roundedToPlace,
   toNumber,
-  type Rational,
 } from './rational.ts'
 import { accept, refuse } from './refusal.ts'
 
@@ -27,27 +27,19 @@ const decimalMarks: Record<Locale, string> = { en: '.', 'decimal-comma': ',' }
 const usualSignificant = 12
 const mostDigits = 15
 
-const tenTo = (power: number): Rational =>
-  power >= 0
-    ? { numerator: 10n ** BigInt(power), denominator: 1n }
-    : { numerator: 1n, denominator: 10n ** BigInt(-power) }
-
 /** A count of digits outside of these is a slip of the caller, not of the person. */
 function checkedDigits(count: number, least: number): number {
   if (Number.isInteger(count) && count >= least && count <= mostDigits) return count
   throw new RangeError(`${count} digits cannot be shown; ${least} to ${mostDigits} can.`)
 }
 
-/** The decimal place at which the value is rounded. */
-function stepOf(value: number, { significant, decimals }: NumberFormat): Rational {
-  if (decimals !== undefined) return tenTo(-checkedDigits(decimals, 0))
+/** The decimal place at which the value is rounded, as a power of ten. */
+function placeOf(value: number, { significant, decimals }: NumberFormat): number {
+  if (decimals !== undefined) return -checkedDigits(decimals, 0)
   const digits = checkedDigits(significant ?? usualSignificant, 1)
   const magnitude = value === 0 ? 0 : Number(value.toExponential().split('e')[1])
-  return tenTo(magnitude - digits + 1)
+  return magnitude - digits + 1
 }
-
-const rounded = (value: number, format: NumberFormat): Rational =>
-  roundToStep(rationalOfNumber(value), stepOf(value, format))
 
 const grouped = (digits: string, mark: string) => digits.replace(/\B(?=(\d{3})+$)/g, mark)
 
@@ -66,7 +58,7 @@ export function tryExpressNumber(value: number | null | undefined, format: Numbe
     )
   }
   const locale = format.locale ?? 'en'
-  const digits = terminatingDecimal(rounded(value, format)) ?? ''
+  const digits = roundedDecimal(value, placeOf(value, format))
   const [whole = '', part = ''] = digits.replace('-', '').split('.')
   const decimals = format.keepTrailingZeros ? part.padEnd(format.decimals ?? 0, '0') : part
   const text = grouped(whole, thousandsMarks[locale]) + (decimals ? decimalMarks[locale] + decimals : '')
@@ -102,7 +94,8 @@ const massUnits: readonly (readonly [string, number])[] = [
   ['mcg', 6],
 ]
 
-const scaled = (value: number, power: number) => toNumber(multiply(rationalOfNumber(value), tenTo(power)))
+const scaled = (value: number, power: number) =>
+  toNumber(multiply(rationalOfNumber(value), powerOfTen(power)))
 
 /**
  * A mass in the unit a person reads it in: g from 1 g up, mg from 1 mg up, mcg below. The unit is chosen after
@@ -113,7 +106,8 @@ export function expressMass(grams: number | null | undefined, format: NumberForm
   if (grams === null || grams === undefined || !Number.isFinite(grams)) return notKnown
   const significant = format.significant ?? usualSignificant
   const [unit, power] = massUnits.find(([, power]) => {
-    const shown = toNumber(rounded(scaled(grams, power), { significant }))
+    const inUnit = scaled(grams, power)
+    const shown = roundedToPlace(inUnit, placeOf(inUnit, { significant }))
     return grams === 0 || Math.abs(shown) >= 1
   }) ?? ['mcg', 6]
   return expressQuantity(scaled(grams, power), unit, format)

@@ -37,6 +37,7 @@ const wholeKinds: Partial<Record<Dimension, AmountKind>> = {
   moles: 'moles',
   equivalents: 'equivalents',
   molarity: 'moles-per-volume',
+  biological: 'units',
 }
 
 const perVolumeKinds: Partial<Record<Dimension, AmountKind>> = {
@@ -44,6 +45,7 @@ const perVolumeKinds: Partial<Record<Dimension, AmountKind>> = {
   volume: 'volume-per-volume',
   moles: 'moles-per-volume',
   equivalents: 'equivalents-per-volume',
+  biological: 'units-per-volume',
 }
 
 const percentKinds: Record<PercentBasis, AmountKind> = {
@@ -58,13 +60,6 @@ function kindOfQuotient(above: TradeUnit, below: TradeUnit): AmountKind | undefi
   if (above.dimension === 'mass' && below.symbol === 'g') return 'mass-per-mass'
   return undefined
 }
-
-const refuseBiological = () =>
-  refuse(
-    'biological-units',
-    'Units of biological activity cannot be turned into a mass without the potency of the lot.',
-    'Write the mass, such as 50 mg, from the potency on the certificate.',
-  )
 
 function refuseQuotient(above: TradeUnit, below: TradeUnit): Read<never> {
   const pair = `${above.symbol}/${below.symbol}`
@@ -85,14 +80,13 @@ function refuseQuotient(above: TradeUnit, below: TradeUnit): Read<never> {
 /** "2.5 g", "10 mM". */
 export function wholeAmount(digits: string, unit: TradeUnit): Read<WrittenQuantity> {
   const kind = wholeKinds[unit.dimension]
-  if (!kind) return refuseBiological()
+  if (!kind) return refuseQuotient(unit, unit)
   const value = multiply(rationalOf(digits), rationalOfNumber(unit.factor))
   return accept({ kind, value, written: `${plainDigits(digits)} ${unit.symbol}` })
 }
 
 /** "10 mg/mL", "1 g per 100 mL", "0.1 mol/kg". */
 export function quotient(digits: string, above: TradeUnit, below: Below): Read<WrittenQuantity> {
-  if (above.dimension === 'biological') return refuseBiological()
   const kind = kindOfQuotient(above, below.unit)
   if (!kind) return refuseQuotient(above, below.unit)
   const amountBelow = rationalOf(below.digits ?? '1')

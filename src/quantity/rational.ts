@@ -64,6 +64,66 @@ export function roundToStep(value: Rational, step: Rational): Rational {
 }
 
 /**
+ * A finite number rounded to a power of ten as it is written, halves away from zero: the same as
+ * `toNumber(roundToStep(rationalOfNumber(value), 10^place))`, by its digits alone.
+ * @example roundedToPlace(2.675, -2) → 2.68
+ */
+export function roundedToPlace(value: number, place: number): number {
+  const { digits, point } = digitsOf(value)
+  return roundedDigits(value, digits, point, place)
+}
+
+/**
+ * The same to a count of digits from the first that is not zero.
+ * @example roundedToDigits(0.0123456, 3) → 0.0123
+ */
+export function roundedToDigits(value: number, count: number): number {
+  const { digits, point } = digitsOf(value)
+  let first = 0
+  while (first < digits.length && digits.charCodeAt(first) === zero) first += 1
+  return first === digits.length ? 0 : roundedDigits(value, digits, point, point - first - count)
+}
+
+const zero = '0'.charCodeAt(0)
+
+/** The shortest digits that read back to the number, and how many of them stand before the point. */
+function digitsOf(value: number): { readonly digits: string; readonly point: number } {
+  const [mantissa = '', exponentText = '0'] = String(Math.abs(value)).split('e')
+  const at = mantissa.indexOf('.')
+  const point = (at < 0 ? mantissa.length : at) + Number(exponentText)
+  return { digits: at < 0 ? mantissa : mantissa.slice(0, at) + mantissa.slice(at + 1), point }
+}
+
+function roundedDigits(value: number, digits: string, point: number, place: number): number {
+  const kept = point - place
+  if (kept >= digits.length) return value
+  if (kept < 0) return 0
+  if (kept > safeDigits) return toNumber(roundToStep(rationalOfNumber(value), powerOfTen(place)))
+  const count = Number(digits.slice(0, kept)) + (digits.charAt(kept) >= '5' ? 1 : 0)
+  if (count === 0) return 0
+  const size = Number(`${count}e${place}`)
+  return value < 0 ? -size : size
+}
+
+/**
+ * Plain digits of a finite number rounded so, without trailing zeros.
+ * @example roundedDecimal(1234.5, 0) → '1235'
+ */
+export function roundedDecimal(value: number, place: number): string {
+  // A double holds fifteen digits as they were rounded; more are kept exact.
+  if (Math.abs(value) < 10 ** (safeDigits + place)) return plainDecimal(roundedToPlace(value, place))
+  return terminatingDecimal(roundToStep(rationalOfNumber(value), powerOfTen(place))) ?? ''
+}
+
+/** So many digits make a whole number that a double holds. */
+const safeDigits = 15
+
+export const powerOfTen = (power: number): Rational =>
+  power >= 0
+    ? { numerator: 10n ** BigInt(power), denominator: 1n }
+    : { numerator: 1n, denominator: 10n ** BigInt(-power) }
+
+/**
  * Plain digits of a value whose decimals end, without trailing zeros; undefined where they do not end (1/3).
  * @example terminatingDecimal(rationalOf('1.50')) → '1.5'
  */

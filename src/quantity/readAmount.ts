@@ -1,5 +1,6 @@
 import type { Amount, AmountKind, Read } from './amount.ts'
 import { readExpression } from './expression.ts'
+import { keptAs } from './kept.ts'
 import type { Locale } from './locale.ts'
 import type { WrittenQuantity } from './notation.ts'
 import { isZero, toNumber } from './rational.ts'
@@ -17,7 +18,14 @@ const quantitySufficient = /^q\.?\s?s\.?(\s*(to|ad))?$/i
 export const isQuantitySufficient = (text: string) => quantitySufficient.test(text.trim())
 
 /** The written quantity of trimmed text, exact, with its size checked. */
-export function readWritten(text: string, locale: Locale): Read<WrittenQuantity> {
+export const readWritten = (text: string, locale: Locale): Read<WrittenQuantity> =>
+  keptAs(written, mostKept, `${locale} ${text}`, () => readAnew(text, locale))
+
+/* The same text is read again at every keystroke in another line, and always reads the same. */
+const written = new Map<string, Read<WrittenQuantity>>()
+const mostKept = 400
+
+function readAnew(text: string, locale: Locale): Read<WrittenQuantity> {
   if (text === '') {
     return refuse('empty', 'Nothing is written.', 'Write a number and a unit, such as 50 mg or 1 % w/v.')
   }
@@ -53,7 +61,7 @@ export function readWritten(text: string, locale: Locale): Read<WrittenQuantity>
  * Sums and products are exact: 0.1 g + 0.2 g is 0.3 g.
  *
  * Refusals: empty, too-long, ambiguous-mark, malformed-number, lost-point, exponent, negative, minus,
- * unknown-character, number-missing, unit-missing, unknown-unit, unit-of-the-wrong-kind, biological-units,
+ * unknown-character, number-missing, unit-missing, unknown-unit, unit-of-the-wrong-kind,
  * dose-per-body-mass, space-in-number, nothing-below, ratio-with-zero, ratio-above-one, ratio-incomplete,
  * product-of-quantities, mixed-kinds, text-left-over, zero, absurd-size, volume-after-quantity-sufficient.
  * @example readAmount('2 x 250 mg') → { ok: true, value: { kind: 'mass', value: 0.5, text: '2 x 250 mg' } }
@@ -86,6 +94,8 @@ export const kindWords: Readonly<Record<AmountKind, string>> = {
   'moles-per-volume': 'moles per volume',
   'equivalents-per-volume': 'equivalents per volume',
   'moles-per-water-mass': 'moles per kilogram of water',
+  units: 'units of activity',
+  'units-per-volume': 'units per volume',
   percent: 'a percentage',
   ratio: 'a ratio',
 }

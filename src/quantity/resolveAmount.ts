@@ -12,6 +12,8 @@ export interface SubstanceFacts {
   readonly densityGPerMl?: number | undefined
   /** Total positive charge of one formula unit: CaCl2 2, NaCl 1; null or 0 for a neutral substance. */
   readonly equivalentsPerMole: number | null
+  /** Units of biological activity in a gram of the pure substance, from the certificate of the lot. */
+  readonly unitsPerGram?: number | undefined
   /** g/mL of the finished solution, which a "% w/w" needs. */
   readonly solutionDensityGPerMl?: number | undefined
 }
@@ -77,6 +79,17 @@ function fromEquivalents(milliequivalents: number, facts: SubstanceFacts): Read<
   return fromMillimoles(milliequivalents / facts.equivalentsPerMole, facts)
 }
 
+function fromUnits(units: number, facts: SubstanceFacts): Read<ResolvedAmount> {
+  if (!facts.unitsPerGram) {
+    return refuse(
+      'biological-units',
+      'Units of biological activity cannot be turned into a mass without the potency of the lot.',
+      'Enter the units per mg of the certificate with the line, or write the mass.',
+    )
+  }
+  return fromGrams(units / facts.unitsPerGram, facts)
+}
+
 function fromVolumeFraction(fraction: number, volumeMl: number, facts: SubstanceFacts): Read<ResolvedAmount> {
   if (fraction > 1) {
     return refuse('more-than-the-whole', 'More than 100 % v/v does not fit.', 'Write at most 100 % v/v.')
@@ -102,7 +115,7 @@ function fromMassFraction(fraction: number, volumeMl: number, facts: SubstanceFa
  * Turns an amount into grams, millimoles and millilitres in the whole volume: unit arithmetic and nothing else.
  * g = mmol · M / 1000; mmol = mEq / (positive charge per formula unit); g = mL · density. Refusals:
  * quantity-sufficient-without-size, volume-missing, molar-mass-missing, volume-of-a-solid, density-missing,
- * equivalents-of-a-neutral-solute, more-than-the-whole, solution-density-missing.
+ * equivalents-of-a-neutral-solute, biological-units, more-than-the-whole, solution-density-missing.
  * @example resolveAmount({ kind: 'equivalents', value: 20, text: '20 mEq' }, calciumChlorideDihydrate, 1000) → { ok: true, value: { grams: 1.47014, mmol: 10 } }
  */
 export function resolveAmount(amount: Amount, facts: SubstanceFacts, volumeMl: number): Read<ResolvedAmount> {
@@ -144,6 +157,10 @@ export function resolveAmount(amount: Amount, facts: SubstanceFacts, volumeMl: n
       return fromEquivalents(value * volumeMl, facts)
     case 'moles-per-water-mass':
       return facts.molarMass ? accept({ molPerKg: value }) : needMolarMass()
+    case 'units':
+      return fromUnits(value, facts)
+    case 'units-per-volume':
+      return fromUnits(value * volumeMl, facts)
     case 'percent':
       return byBasis(value / 100)
     case 'ratio':

@@ -1,4 +1,4 @@
-import { create, unitDependencies, type FactoryFunctionMap, type Unit } from 'mathjs'
+import { unitOfMathjs } from './mathjsUnit.ts'
 
 /** What a unit measures. A molarity (M, mM) is moles per volume in one word. */
 export type Dimension = 'mass' | 'volume' | 'moles' | 'equivalents' | 'molarity' | 'biological'
@@ -11,14 +11,9 @@ export interface TradeUnit {
   readonly factor: number
 }
 
-// The declared type of a dependency collection is wider than what `create` asks for; the content is the same.
-const { unit } = create({ unitDependencies } as unknown as FactoryFunctionMap) as {
-  unit: (value: number, name: string) => Unit
-}
-
 /** All factors here are powers of ten; the library's own binary noise (1000.0000000000001) is cut off. */
 const factorOf = (name: string, canonical: string) =>
-  Number(unit(1, name).toNumber(canonical).toPrecision(12))
+  Number(unitOfMathjs(1, name).toNumber(canonical).toPrecision(12))
 
 const gramsIn = (name: string) => factorOf(name, 'g')
 const millilitresIn = (name: string) => factorOf(name, 'mL')
@@ -43,7 +38,7 @@ const rows: readonly Row[] = [
   ['molarity', 'mol/L', millimolesIn('mol') / millilitresIn('L'), 'M'],
   ['molarity', 'mmol/L', millimolesIn('mmol') / millilitresIn('L'), 'mM'],
   ['molarity', 'micromol/L', millimolesIn('umol') / millilitresIn('L'), 'microM uM µM μM'],
-  ['biological', 'units', 1, 'units unit U u IU iu UI'],
+  ['biological', 'units', 1, 'units unit'],
 ]
 
 const table: ReadonlyMap<string, TradeUnit> = new Map(
@@ -81,5 +76,10 @@ export const misread: ReadonlyMap<string, string> = new Map([
   ['dl', 'Write per 100 mL, such as 5 mg/100 mL.'],
   ['ppm', 'Write mg/L.'],
   ['N', 'Write mEq/mL for a normality.'],
+  ['U', 'Write units in full.'],
+  ['u', 'Write units in full.'],
+  ['IU', 'Write units in full.'],
+  ['iu', 'Write units in full.'],
+  ['UI', 'Write units in full.'],
   ['m', 'Write mol/kg for a molality.'],
 ])

@@ -1,4 +1,5 @@
 import type { Amount, AmountKind } from './amount.ts'
+import { expressNumber } from './express.ts'
 import { typedDigits, type Locale } from './locale.ts'
 import { divide, rationalOfNumber, terminatingDecimal, toNumber, type Rational } from './rational.ts'
 import { readWritten } from './readAmount.ts'
@@ -23,6 +24,8 @@ const notations: Record<Exclude<AmountKind, 'quantity-sufficient' | 'ratio'>, (v
   'moles-per-volume': () => ['mol/L', 1],
   'equivalents-per-volume': () => ['mEq/mL', 1],
   'moles-per-water-mass': () => ['mol/kg', 1],
+  units: () => ['units', 1],
+  'units-per-volume': () => ['units/mL', 1],
   percent: () => ['%', 1],
 }
 
@@ -66,3 +69,10 @@ function keptNotation({ kind, value, text }: Amount): string | undefined {
   }
   return undefined
 }
+
+/**
+ * The same in safe expression for print: large numbers grouped.
+ * @example printAmount({ kind: 'units', value: 10000, text: '10000 units' }) → '10,000 units'
+ */
+export const printAmount = (amount: Amount): string =>
+  writeAmount(amount).replaceAll(/\d+(\.\d+)?/g, (digits) => expressNumber(Number(digits)))

@@ -1,43 +1,87 @@
+import type { Evaluation, LineAliquot } from '../evaluation/types.ts'
+import type { AliquotPlan } from '../evaluation/weighing/aliquot.ts'
+import type { Trituration } from '../evaluation/weighing/plan.ts'
+import { vehicleOf } from './order.ts'
 import { massText, numberText, volumeText } from './say.ts'
-import { nameOf } from './weighings.ts'
-import type { Evaluation } from '../evaluation/types.ts'
-import type { SheetSection } from './types.ts'
+import { box, cell, figures, names, words } from './sections.ts'
+import type { SheetCell, SheetSection } from './types.ts'
+import { nameOf } from './names.ts'
 
-/** How the masses below the least weighable one are measured by dilution. */
+/** How the masses that cannot be weighed as such are measured: by dilution, or in a solid. */
 export function aliquotSection(evaluation: Evaluation): SheetSection | null {
-  if (evaluation.aliquots.length === 0) return null
+  const rows = evaluation.aliquots.map((aliquot) => row(aliquot, evaluation))
+  if (rows.length === 0) return null
+  const carried = evaluation.weighingPlan?.carriedMl ?? 0
+  const share =
+    carried > 0
+      ? `${volumeText(carried, 5)} of ${vehicleOf(evaluation)} enter with the aliquots and are part of the final volume. `
+      : ''
   return {
     kind: 'table',
-    heading: 'By aliquot: masses below the least that the balance weighs within 0.1 %',
+    heading: 'By aliquot: masses too small to be weighed as such',
     columns: [
-      { label: 'Ingredient', align: 'start' },
-      { label: 'Needed', align: 'end' },
-      { label: 'Weigh', align: 'end' },
-      { label: 'Bring to volume and draw', align: 'start' },
-      { label: 'Error of the dose', align: 'end' },
-      { label: 'Done', align: 'start', blank: true },
-      { label: 'Checked', align: 'start', blank: true },
+      names('Ingredient'),
+      figures('Needed'),
+      figures('Weigh'),
+      words('Dilute or mix, then take'),
+      words('Largest error of the dose'),
+      box('Weighed'),
+      box('Done'),
+      box('Check'),
     ],
-    rows: evaluation.aliquots.flatMap(({ key, neededGrams, plan }) => {
-      const line = evaluation.lines.find((candidate) => candidate.key === key)
-      if (!line) return []
-      const steps = plan
-        ? plan.steps
-            .map(({ flaskMl, drawMl }) => `to ${volumeText(flaskMl)}, draw ${volumeText(drawMl)}`)
-            .join('; then ')
-        : 'no two dilutions reach this mass: use a stock of known strength'
-      return [
-        [
-          { text: nameOf(line) },
-          { text: massText(neededGrams, 5) },
-          { text: plan ? massText(plan.weighGrams, 5) : '' },
-          { text: steps },
-          { text: plan ? `${numberText(plan.errorPercent, 2)} %` : '' },
-          { text: '' },
-          { text: '' },
-        ],
-      ]
-    }),
-    note: 'The diluent drawn with each aliquot is part of the final volume. It must be the vehicle, and the substance must dissolve in it at that strength.',
+    rows,
+    note: `Dilute with ${vehicleOf(evaluation)}; check that all has dissolved before drawing. ${share}What is left over is discarded and written down.`,
   }
+}
+
+function row({ key, neededGrams, plan }: LineAliquot, evaluation: Evaluation): readonly SheetCell[] {
+  const line = evaluation.lines.find((candidate) => candidate.key === key)
+  const trituration = evaluation.weighingPlan?.lines.find((weighing) => weighing.key === key)?.trituration
+  const start = [cell(line ? nameOf(line) : key), cell(massText(neededGrams, 5))]
+  const blanks = [cell(''), cell(''), cell('')]
+  if (plan) return [...start, ...dilution(plan), ...blanks]
+  if (trituration) return [...start, ...mixing(trituration, evaluation), ...blanks]
+  return [
+    ...start,
+    cell(''),
+    cell('no two dilutions reach this mass: use a stock of known strength'),
+    cell(''),
+    ...blanks,
+  ]
+}
+
+function dilution({ weighGrams, steps, budget, ...plan }: AliquotPlan): readonly SheetCell[] {
+  const taken = steps.map(({ flaskMl, flaskName, drawMl, pipetteName }) => ({
+    text: `to ${volumeText(flaskMl)}, draw ${volumeText(drawMl)}`,
+    small: `${flaskName}; ${pipetteName}`,
+  }))
+  return [
+    cell(
+      massText(weighGrams, 7),
+      `${numberText(plan.multiple, 6)} times; ${massText(plan.wastedGrams, 4)} left over`,
+    ),
+    cell(taken.map(({ text }) => text).join('; of that '), taken.map(({ small }) => small).join('; ')),
+    cell(
+      `${numberText(plan.errorPercent, 2)} %`,
+      `weighing ${numberText(budget.weighingPercent, 2)} %, flasks ${numberText(budget.flasksPercent, 2)} %, draws ${numberText(budget.drawsPercent, 2)} %`,
+    ),
+  ]
+}
+
+function mixing({ steps, errorPercent, ...plan }: Trituration, evaluation: Evaluation): readonly SheetCell[] {
+  const line = evaluation.lines.find(({ key }) => key === plan.diluentKey)
+  const diluent = line ? nameOf(line) : plan.diluentKey
+  const taken = steps.map(
+    ({ diluentGrams, portionGrams }) =>
+      `mix with ${massText(diluentGrams, 7)} of ${diluent}, take ${massText(portionGrams, 7)}`,
+  )
+  const carried = massText(plan.carriedGrams, 5)
+  return [
+    cell(massText(steps[0]?.weighGrams ?? null, 7)),
+    cell(
+      taken.join('; of that '),
+      `${carried} of ${diluent} come with it: weigh that much less of ${diluent}`,
+    ),
+    cell(`${numberText(errorPercent, 2)} %`, `holds ${massText(plan.doseGrams, 5)}`),
+  ]
 }

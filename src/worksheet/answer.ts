@@ -8,6 +8,8 @@ import type {
   SolutionAnswer,
 } from '../evaluation/types.ts'
 import { methodIds } from '../evaluation/types.ts'
+import { groupLines, summed, type LineGroup } from '../evaluation/stocks/group.ts'
+import type { StockShare } from '../evaluation/stocks/stock.ts'
 import { tellFinding } from './tell.ts'
 
 /* The JSON that the command line prints: the keys of the published contract, and additions after them. */
@@ -99,6 +101,8 @@ const ingredientOf = (key: string, { lines }: Evaluation): string | null =>
 
 /** Every line of the formula in its order; one that could not be read has nothing but its ingredient. */
 function lineAnswer({ key, ingredient }: FormulaLine, { lines }: Evaluation): Value {
+  const group = groupLines(lines).find((candidate) => candidate.key === key)
+  if (group?.stock) return stockAnswer(group, group.stock)
   const line = lines.find((candidate) => candidate.key === key)
   return {
     ingredient: typeof ingredient === 'string' ? ingredient : ingredient.id,
@@ -113,8 +117,31 @@ function lineAnswer({ key, ingredient }: FormulaLine, { lines }: Evaluation): Va
     mL: line?.millilitres ?? null,
     effective_i: line?.effectiveI ?? null,
     effective_osmolality_share_mOsm_per_kg: line?.effectiveOsmolalityShareMilliosmPerKg ?? null,
+    ordered_as: line?.ordered?.orderedName ?? null,
+    form_factor: line?.ordered?.factor ?? null,
+    content_percent: line?.certified ? line.certified.content * 100 : null,
   }
 }
+
+/** A line that measures a stock: its totals, and what it brings of each ingredient. */
+const stockAnswer = (group: LineGroup, { stock, fills }: StockShare): Value => ({
+  ingredient: stock.id,
+  grams: summed(group, ({ grams }) => grams),
+  mmol: summed(group, ({ millimoles }) => millimoles),
+  particles_formal: null,
+  particles_counted: null,
+  share_of_particles_percent: summed(group, (line) => line.shareOfParticlesPercent),
+  osmolality_share_mOsm_per_kg: summed(group, (line) => line.osmolalityShareMilliosmPerKg),
+  mL: group.lines[0]?.millilitres ?? null,
+  effective_osmolality_share_mOsm_per_kg: summed(group, (line) => line.effectiveOsmolalityShareMilliosmPerKg),
+  fills,
+  holds: group.lines.map((line) => ({
+    ingredient: line.ingredient.id,
+    grams: line.grams,
+    mmol: line.millimoles,
+    osmolality_share_mOsm_per_kg: line.osmolalityShareMilliosmPerKg,
+  })),
+})
 
 function findingAnswer(finding: Finding, library: Library): Value {
   const { message, wayOut } = tellFinding(finding, library)

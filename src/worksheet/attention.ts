@@ -6,13 +6,32 @@ import type { SheetCaution, SheetSection } from './types.ts'
 
 const order: Readonly<Record<Severity, number>> = { stop: 0, warn: 1, note: 2 }
 
-/** Stops and warnings, stops first, each with what to do and where it comes from. */
-export function attentionSection(evaluation: Evaluation, library: Library): SheetSection {
+/** Stops and warnings, stops first, each with what to do; in full with where it comes from. */
+export function attentionSection(
+  evaluation: Evaluation,
+  library: Library,
+  length: 'short' | 'full',
+): SheetSection {
   const cautions = evaluation.findings
     .filter(({ severity }) => severity !== 'note')
     .toSorted((first, second) => order[first.severity] - order[second.severity])
     .map((finding) => told(finding, evaluation, library))
+    .map((caution) => (length === 'short' ? { ...caution, source: '' } : caution))
   return { kind: 'cautions', heading: 'What to watch', cautions }
+}
+
+/** Where the stops and warnings come from. */
+export function sourceSection(evaluation: Evaluation, library: Library): SheetSection | null {
+  const serious = evaluation.findings.filter(({ severity }) => severity !== 'note')
+  if (serious.length === 0) return null
+  return {
+    kind: 'arithmetic',
+    heading: 'Sources of what to watch',
+    lines: serious.map((finding) => {
+      const { text: said, source } = told(finding, evaluation, library)
+      return `${said} (${source})`
+    }),
+  }
 }
 
 /** Remarks that stop nobody, in small print behind the work. */

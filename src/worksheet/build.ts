@@ -1,71 +1,56 @@
-import { aliquotSection } from './aliquots.ts'
-import { arithmeticSections } from './arithmetic.ts'
-import { attentionSection, noteSection, shutReasons } from './attention.ts'
-import { methodSection } from './methods.ts'
-import { orderSection, recordSection } from './order.ts'
-import { contributionSection, electrolyteSection, readingSection, resultSection } from './results.ts'
-import { volumeText } from './say.ts'
-import { beyondUseSection, signOffSection, verificationSection } from './standing.ts'
-import { mixingSteps } from './steps.ts'
-import { nameOf, weighingTable } from './weighings.ts'
-import { sterileRoutes } from './routes.ts'
-import type { Library } from '../library/library.ts'
 import type { Evaluation } from '../evaluation/types.ts'
-import type { Paper, SheetSection, Worksheet } from './types.ts'
+import type { Library } from '../library/library.ts'
+import { shutReasons } from './attention.ts'
+import { batchRecord } from './documents/batch.ts'
+import { checkersPage } from './documents/checker.ts'
+import { howTheFiguresWereFound } from './documents/figures.ts'
+import { masterRecord } from './documents/master.ts'
+import { documentKinds, usualDocuments } from './kinds.ts'
+import { labelSection } from './label.ts'
+import { verificationSection } from './standing.ts'
+import type { DocumentId, Paper, SheetSection, Worksheet } from './types.ts'
+
+type SectionMaker = (evaluation: Evaluation, library: Library) => readonly SheetSection[]
+
+const makers: Readonly<Record<DocumentId, SectionMaker>> = {
+  batch: batchRecord,
+  checker: checkersPage,
+  master: masterRecord,
+  label: (evaluation) => [labelSection(evaluation), verificationSection(evaluation)],
+  figures: howTheFiguresWereFound,
+}
+
+/** So that the foot of a page holds the mark. */
+const longestMark = 60
 
 /**
- * The finished sheet of one evaluation: every string made once, nothing calculated again. Preview and paper show
- * exactly this.
+ * The finished documents of one evaluation: every string made once, nothing calculated again. Preview and paper show
+ * exactly these.
  */
-export function buildWorksheet(evaluation: Evaluation, library: Library, paper: Paper): Worksheet {
+export function buildWorksheet(
+  evaluation: Evaluation,
+  library: Library,
+  paper: Paper,
+  wanted: readonly DocumentId[] = usualDocuments,
+): Worksheet {
   const { formula } = evaluation
-  const lot = formula.order?.lot
+  const title = formula.title || 'Untitled formula'
+  const version = formula.order?.masterRecord ?? '________'
+  const batch = `batch ${formula.order?.lot ?? '____________'}; `
+  const shortTitle = title.length > longestMark ? `${title.slice(0, longestMark)}…` : title
   return {
-    title: formula.title || 'Untitled formula',
-    pageMark: `${formula.title || 'Untitled formula'}; lot ${lot ?? '____________'}; library ${evaluation.libraryVersion}`,
+    title,
     paper,
     shutBecause: shutReasons(evaluation, library),
-    sections: sectionsOf(evaluation, library),
-  }
-}
-
-function sectionsOf(evaluation: Evaluation, library: Library): readonly SheetSection[] {
-  const optional = [
-    methodSection(evaluation),
-    contributionSection(evaluation),
-    electrolyteSection(evaluation),
-  ].filter((section) => section !== null)
-  const notes = noteSection(evaluation, library)
-  const aliquots = aliquotSection(evaluation)
-  return [
-    orderSection(evaluation),
-    attentionSection(evaluation, library),
-    weighingTable(evaluation),
-    ...(aliquots ? [aliquots] : []),
-    stepSection(evaluation, library),
-    resultSection(evaluation),
-    readingSection(evaluation),
-    ...optional,
-    recordSection(evaluation),
-    beyondUseSection(),
-    signOffSection(),
-    ...(notes ? [notes] : []),
-    ...arithmeticSections(evaluation),
-    verificationSection(evaluation),
-  ]
-}
-
-function stepSection(evaluation: Evaluation, library: Library): SheetSection {
-  const volume = evaluation.batchVolumeMl ?? evaluation.volumeMl
-  return {
-    kind: 'steps',
-    heading: 'Steps',
-    steps: mixingSteps(library.steps, {
-      lines: evaluation.lines,
-      vehicle: evaluation.formula.vehicle ?? 'water for injection',
-      volume: volume === null ? 'the final volume' : volumeText(volume),
-      sterile: sterileRoutes.has(evaluation.formula.route),
-      nameOf,
+    documents: wanted.map((id) => {
+      const { name, purpose } = documentKinds[id]
+      return {
+        id,
+        name,
+        purpose,
+        pageMark: `${name}: ${shortTitle}; ${id === 'master' ? '' : batch}master record ${version}; library ${evaluation.libraryVersion}`,
+        sections: makers[id](evaluation, library),
+      }
     }),
   }
 }

@@ -1,62 +1,75 @@
-import { field, fields } from './sections.ts'
-import { routeNames } from './routes.ts'
-import { numberText, volumeText } from './say.ts'
+import type { BatchParts } from '../evaluation/weighing/batchParts.ts'
 import type { Evaluation } from '../evaluation/types.ts'
-import type { SheetSection } from './types.ts'
+import { readTarget } from '../quantity/readMeasure.ts'
+import { dosageForms, routeNames } from './routes.ts'
+import { numberText, volumeText } from './say.ts'
+import { field, fields, wide } from './sections.ts'
+import { strengthsText } from './strength.ts'
+import type { SheetField, SheetSection } from './types.ts'
 
-/** What is ordered. */
-export function orderSection(evaluation: Evaluation): SheetSection {
-  const { formula } = evaluation
-  return fields('The order', [
-    field('Preparation', formula.title || null),
+export const vehicleOf = ({ formula }: Evaluation): string => formula.vehicle ?? 'water for injection'
+
+/** What the preparation is, in either record. */
+export function identityFields(evaluation: Evaluation): readonly SheetField[] {
+  const { formula, volumeMl } = evaluation
+  return [
+    wide('Strength', strengthsText(evaluation)),
     field('Route', routeNames[formula.route]),
-    field(
-      'Final volume of one container',
-      evaluation.volumeMl === null ? null : volumeText(evaluation.volumeMl),
-    ),
-    field('Batch', batchText(evaluation)),
-    field('Vehicle', formula.vehicle ?? 'water for injection'),
-    field('Target', targetText(evaluation)),
-    field('Order number', formula.order?.orderNumber ?? null),
-    field('Prepared for', formula.order?.preparedFor ?? null),
-    field('Lot of this batch', formula.order?.lot ?? null),
-    field('Master formulation record and version', formula.order?.masterRecord ?? null),
+    field('Dosage form', dosageForms[formula.route]),
+    field('One container holds', volumeMl === null ? null : volumeText(volumeMl)),
+    field('Vehicle', vehicleOf(evaluation)),
     field('Container and closure', formula.order?.container ?? null),
-    field('Date and time of preparation', null),
+    field('Target', targetText(evaluation)),
+  ]
+}
+
+/** What is ordered, and for whom. */
+export function orderSection(evaluation: Evaluation): SheetSection {
+  const { order } = evaluation.formula
+  return fields('The order', [
+    field('Preparation', evaluation.formula.title || null),
+    field('Prepared for', order?.preparedFor ?? null),
+    ...identityFields(evaluation),
+    field('Order number', order?.orderNumber ?? null),
+    field('Lot of this batch', order?.lot ?? null),
+    field('Master record and version', order?.masterRecord ?? null),
+    field('Prepared, date and time', null),
+    field('Beyond-use date and time', null),
+    field('Storage', null),
+    wide('Batch', batchText(evaluation)),
   ])
 }
 
-function batchText({ formula, batchVolumeMl, volumeMl }: Evaluation): string | null {
-  if (volumeMl === null || batchVolumeMl === null) return null
-  const units = formula.batch?.units ?? 1
-  const excess = formula.batch?.excess
-  const containers = `${numberText(units, 4)} ${units === 1 ? 'container' : 'containers'} of ${volumeText(volumeMl)}`
-  return `${containers}${excess ? ` and ${excess} extra` : ''} = ${volumeText(batchVolumeMl)}`
+/** Each part of the batch printed; the extra apart. */
+export function batchText({ weighingPlan, batchVolumeMl }: Evaluation): string | null {
+  const parts = weighingPlan?.batch
+  if (!parts || batchVolumeMl === null) return null
+  const apart = parts.excessMl > 0 ? ` + ${volumeText(parts.excessMl)} extra for losses, apart` : ''
+  return `${containersText(parts)}${part(parts.holdUpMl, 'hold-up of filter and tubing')}${part(
+    parts.samplesMl,
+    'samples for tests',
+  )}${apart} = ${volumeText(batchVolumeMl)}. No overage of any ingredient.`
 }
+
+function containersText({ units, labelMl, overfillMl, overfillKind }: BatchParts): string {
+  const containers = `${numberText(units, 6)} ${units === 1 ? 'container' : 'containers'}`
+  if (overfillKind === null) return `${containers} of ${volumeText(labelMl)} (no excess volume asked)`
+  return `${containers} of ${volumeText(labelMl)} + ${volumeText(overfillMl, 4)} excess each (USP <1151>, ${overfillKind} liquid)`
+}
+
+const part = (millilitres: number, words: string) =>
+  millilitres > 0 ? ` + ${volumeText(millilitres)} ${words}` : ''
 
 const targetNames = {
-  osmolality: 'osmolality',
-  'effective-osmolality': 'effective osmolality',
-  'sodium-chloride-equivalent': 'sodium chloride equivalent',
-  'freezing-point-depression': 'freezing-point depression',
+  osmolality: ['osmolality', 'mOsm/kg'],
+  'effective-osmolality': ['effective osmolality', 'mOsm/kg'],
+  'sodium-chloride-equivalent': ['sodium chloride equivalent', '% w/v'],
+  'freezing-point-depression': ['freezing-point depression', 'K'],
 } as const
 
-const targetText = ({ formula: { target } }: Evaluation): string =>
-  target ? `${targetNames[target.quantity]} ${target.value}` : 'none set'
-
-/** What a record needs and only the bench can fill. */
-export function recordSection(evaluation: Evaluation): SheetSection {
-  return fields('Record of this batch', [
-    field(
-      'Balance (id, readability)',
-      evaluation.formula.balance ? `____________ ${evaluation.formula.balance}` : null,
-    ),
-    field('pH meter (id, buffers used today)', null),
-    field('Osmometer (id, reference reading)', null),
-    field('Filter (pore size, lot, integrity limit and result)', null),
-    field('Containers (type, lot)', null),
-    field('Line clearance and cleaning', null),
-    field('Yield: containers filled, rejected, samples', null),
-    field('Deviations and what was done', null),
-  ])
+export function targetText({ formula: { target } }: Evaluation): string {
+  if (!target) return 'none set'
+  const [name, unit] = targetNames[target.quantity]
+  const read = readTarget(target.quantity, target.value)
+  return read.ok ? `${name} ${numberText(read.value, 6)} ${unit}` : `${name}: cannot be read`
 }

@@ -1,18 +1,34 @@
-import { field, fields } from './sections.ts'
+import { field, fields, wide } from './sections.ts'
 import { decimalText, numberText, percentText, wholeText } from './say.ts'
 import type { Evaluation, SolutionAnswer } from '../evaluation/types.ts'
 import type { SheetField, SheetSection } from './types.ts'
 
-/** What the finished solution is predicted to be, with the limits for the readings. */
-export function resultSection(evaluation: Evaluation): SheetSection {
+/** What the finished solution is predicted to be; the record of a batch has the short of it. */
+export function resultSection(evaluation: Evaluation, length: 'short' | 'full'): SheetSection {
   const { solution } = evaluation
   if (!solution)
     return fields('What the solution is', [field('No figure is given', 'the formula is blocked')])
+  if (length === 'short') return fields('What the solution is', shortened(evaluation, solution))
   return fields('What the solution is', [
     ...osmotic(evaluation, solution),
     ...acidity(solution),
     ...other(solution),
   ])
+}
+
+function shortened(evaluation: Evaluation, solution: SolutionAnswer): readonly SheetField[] {
+  const { osmolality, effectiveOsmolality, labelOsmolarityMilliosmPerL } = solution
+  const error = evaluation.weighingPlan?.preparationMilliosmPerKg ?? null
+  return [
+    wide(
+      'Osmolality',
+      `${wholeText(osmolality.value)} mOsm/kg (${wholeText(osmolality.low)} to ${wholeText(osmolality.high)}), as a freezing-point osmometer reads it; ${basis[evaluation.headline]}`,
+    ),
+    field('Effective (held by cells)', `${wholeText(effectiveOsmolality.value)} mOsm/kg`),
+    field('Label osmolarity', withUnit(wholeText, labelOsmolarityMilliosmPerL, 'mOsm per L')),
+    field('Weighing, filling (standard)', withUnit(digits(2), error, 'mOsm/kg')),
+    field('Density', withUnit(digits(4), solution.densityGPerMl, 'g per mL')),
+  ]
 }
 
 const basis = {
@@ -59,43 +75,6 @@ function other(solution: SolutionAnswer): readonly SheetField[] {
     field('Ionic strength', withUnit(digits(3), solution.ionicStrength, 'mol per kg water')),
     field('Density', withUnit(digits(4), solution.densityGPerMl, 'g per mL')),
   ]
-}
-
-/** Readings with their limits beside the blanks. */
-export function readingSection({ solution }: Evaluation): SheetSection {
-  const osmolality = solution
-    ? `stop and ask if below ${wholeText(solution.osmolality.low)} or above ${wholeText(solution.osmolality.high)} mOsm/kg`
-    : 'no limits: the formula is blocked'
-  const pH =
-    solution?.pH === undefined || solution.pH === null
-      ? 'by monograph or local procedure'
-      : `expected ${decimalText(solution.pH, 2)}; limits by monograph or local procedure`
-  const reading = (what: string, limit: string) => [
-    { text: what },
-    { text: limit },
-    ...Array.from({ length: 3 }, () => ({ text: '' })),
-  ]
-  return {
-    kind: 'table',
-    heading: 'Readings before release',
-    columns: [
-      { label: 'Test', align: 'start' },
-      { label: 'Limit', align: 'start' },
-      { label: 'Reading', align: 'start', blank: true },
-      { label: 'Passes', align: 'start', blank: true },
-      { label: 'Initials', align: 'start', blank: true },
-    ],
-    rows: [
-      reading('Osmolality, mean of three', osmolality),
-      reading('pH at ____ °C', pH),
-      reading(
-        'Clarity and particles, on black and on white',
-        'clear, no visible particles, unless the monograph says otherwise',
-      ),
-      reading('Filter integrity, where filtered', 'by the filter maker’s limit'),
-      reading('Containers: filled, rejected, kept as samples', 'reconciles with the batch size'),
-    ],
-  }
 }
 
 /** Each ion per mL, per container. */

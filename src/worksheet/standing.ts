@@ -1,38 +1,21 @@
-import { fields, field, text } from './sections.ts'
+import { loadBeyondUse } from '../library/steps.ts'
 import type { Evaluation } from '../evaluation/types.ts'
+import { eyeRoutes, sterileRoutes } from './routes.ts'
+import { text } from './sections.ts'
 import type { SheetSection } from './types.ts'
 
-/** The date is never set here. */
-export const beyondUseSection = (): SheetSection =>
-  fields('Beyond-use date and storage', [
-    field('Beyond-use date (set by local policy and stability evidence, never by this sheet)', null),
-    field('Storage', null),
-    field('Reference that supports it', null),
+/** The date is never set here; what policies say is printed as a caution. */
+export function beyondUseSection({ formula: { route } }: Evaluation): SheetSection {
+  const { sterile, nonsterile, eye } = loadBeyondUse()
+  const orientation = sterileRoutes.has(route) ? sterile : nonsterile
+  const opened = eyeRoutes.has(route) ? ` ${eye.text}` : ''
+  return text('Beyond-use date', [
+    `Set by local policy and evidence of stability, never by this sheet; it stays blank until then. ${orientation.text}${opened} (${orientation.evidence}: verify)`,
   ])
-
-export const signOffSection = (): SheetSection => ({
-  kind: 'table',
-  heading: 'Checks and signatures',
-  columns: [
-    { label: 'Check', align: 'start' },
-    { label: 'Done by', align: 'start', blank: true },
-    { label: 'Checked by', align: 'start', blank: true },
-    { label: 'Date and time', align: 'start', blank: true },
-  ],
-  rows: [
-    'Order: patient, route, dose, allergies',
-    'Calculation repeated by a second person without reading the first',
-    'Identity, form and lot of each ingredient, read from the container',
-    'Each weighing and volume, before mixing',
-    'pH and osmolality within the limits',
-    'Labels printed, used, destroyed',
-    'Release, by someone who did not prepare it',
-  ].map((check) => [{ text: check }, { text: '' }, { text: '' }, { text: '' }]),
-})
+}
 
 /** What the figures are and are not. */
 export const verificationSection = (evaluation: Evaluation): SheetSection =>
   text('Standing of these figures', [
-    'Every result on this sheet needs independent verification before use. Cautions defer to local policy, the product label and licensed practice.',
-    `Figures marked from memory were recalled and not read again; verify them. Library ${evaluation.libraryVersion}.`,
+    `Every result on this sheet needs independent verification before use. Cautions defer to local policy, the product label and licensed practice. Figures marked from memory were recalled and not read again. Library ${evaluation.libraryVersion}.`,
   ])

@@ -1,7 +1,12 @@
+import type { Library } from '../library/library.ts'
 import type { Ingredient } from '../library/types.ts'
 import type { StepRule } from '../library/steps.ts'
-import type { LineAnswer } from '../evaluation/types.ts'
-import type { SheetStep } from './types.ts'
+import type { Evaluation, LineAnswer } from '../evaluation/types.ts'
+import { nameOf } from './names.ts'
+import { vehicleOf } from './order.ts'
+import { sterileRoutes } from './routes.ts'
+import { volumeText } from './say.ts'
+import type { SheetSection, SheetStep } from './types.ts'
 
 export interface StepContext {
   readonly lines: readonly LineAnswer[]
@@ -56,4 +61,30 @@ function fill(template: string, context: StepContext, taken: readonly LineAnswer
 function listed(names: readonly string[]): string {
   const last = names.at(-1) ?? ''
   return names.length < 2 ? last : `${names.slice(0, -1).join(', ')} and ${last}`
+}
+
+/** The steps: for a batch with its volume and tick boxes, for the recipe with the volume of one container. */
+export function stepSection(evaluation: Evaluation, library: Library, ticked: boolean): SheetSection {
+  const volume = ticked ? (evaluation.batchVolumeMl ?? evaluation.volumeMl) : evaluation.volumeMl
+  return {
+    kind: 'steps',
+    heading: 'Steps',
+    ticked,
+    steps: mixingSteps(library.steps, {
+      lines: evaluation.lines,
+      vehicle: vehicleOf(evaluation),
+      volume: volume === null ? 'the final volume' : volumeText(volume),
+      sterile: sterileRoutes.has(evaluation.formula.route),
+      nameOf: (line) => nameOf(line) + wayOf(line, evaluation, ticked),
+    }),
+  }
+}
+
+/** In a batch a substance comes as it was measured. */
+function wayOf({ key }: LineAnswer, { aliquots, weighingPlan }: Evaluation, isBatch: boolean): string {
+  if (!isBatch) return ''
+  const plan = aliquots.find((aliquot) => aliquot.key === key)?.plan
+  if (plan) return ` (the aliquot of ${volumeText(plan.carriedMl, 5)})`
+  const weighing = weighingPlan?.lines.find((line) => line.key === key)
+  return weighing?.trituration ? ' (the portion of the trituration)' : ''
 }

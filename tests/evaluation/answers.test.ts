@@ -101,6 +101,7 @@ describe('findings', () => {
       [line('mannitol', '0.4 mg'), line('urea', '1.6 %'), line('sodium-chloride', '0.4 mg')],
       {
         balance: '1 mg',
+        finalVolume: '1 mL',
       },
     )
     const rank = { stop: 0, warn: 1, note: 2 }

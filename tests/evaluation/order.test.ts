@@ -108,8 +108,19 @@ describe('lowering', () => {
 describe('the balance', () => {
   const weighing = (amount: string) => evaluated([line('sodium-chloride', amount)], { balance: '1 mg' })
 
-  it('stops below its step, keeps the mass and points to an aliquot', () => {
+  it('dilutes what is below its step and evaluates the aliquot', () => {
     const evaluation = weighing('0.4 mg')
+    const [aliquot] = evaluation.aliquots
+    expect(codesOf(evaluation)).toContain('measured-by-aliquot')
+    expect(evaluation.lines[0]?.grams).toBeCloseTo(aliquot?.plan?.doseGrams ?? 0, 15)
+    expect(Math.abs((evaluation.lines[0]?.grams ?? 0) / 0.0004 - 1)).toBeLessThan(0.04)
+  })
+
+  it('stops below its step where no dilution fits, and keeps the mass', () => {
+    const evaluation = evaluated([line('sodium-chloride', '0.4 mg')], {
+      balance: '1 mg',
+      finalVolume: '5 mL',
+    })
     expect(evaluation.findings.find(({ code }) => code === 'below-readability')?.severity).toBe('stop')
     expect(evaluation.lines[0]?.grams).toBeCloseTo(0.0004, 12)
   })
@@ -120,7 +131,10 @@ describe('the balance', () => {
   })
 
   it('warns where rounding changes the strength', () => {
-    expect(codesOf(weighing('1.4 mg'))).toContain('rounding-changes-strength')
+    const small = { balance: '1 mg', finalVolume: '5 mL' }
+    expect(codesOf(evaluated([line('sodium-chloride', '1.4 mg')], small))).toContain(
+      'rounding-changes-strength',
+    )
     expect(codesOf(weighing('900.4 mg'))).not.toContain('rounding-changes-strength')
   })
 })

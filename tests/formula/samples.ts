@@ -48,7 +48,22 @@ export const full: Formula = {
     { key: 'c', ingredient: 'sodium-chloride', amount: 'q.s.' },
   ],
   balance: '1 mg',
-  batch: { units: 10, excess: '5 mL' },
+  bench: {
+    balances: [
+      {
+        name: 'analytical',
+        readability: '0.1 mg',
+        repeatability: '0.08 mg',
+        sensitivity: '6 mg',
+        allowedErrorPercent: 5,
+        capacity: '220 g',
+      },
+    ],
+    measures: [
+      { name: 'syringe', kind: 'syringe', capacity: '5 mL', graduation: '0.2 mL', tolerance: '0.2 mL' },
+    ],
+  },
+  batch: { units: 10, excess: '5 mL', overfill: 'mobile', holdUp: '2 mL', samples: '1 mL' },
   order: { orderNumber: '17', lot: 'D1', masterRecord: 'M1', container: 'dropper', preparedFor: 'Demo' },
   patient: { ageYears: 40, weightKg: 70, doseVolume: '0.05 mL', infusionRate: '1 mL/h' },
   vehicle: 'water for injection',

@@ -26,6 +26,8 @@ function actionShape(action: ProgramSchema & { readonly requirement?: unknown },
   switch (type) {
     case 'max_length':
       return isList ? { maxItems: requirement } : { maxLength: requirement }
+    case 'min_length':
+      return isList ? { minItems: requirement } : { minLength: requirement }
     case 'non_empty':
       return { minLength: 1 }
     case 'trim':

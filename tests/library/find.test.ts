@@ -78,7 +78,7 @@ describe('finding an ingredient', () => {
       ['edeta', 'edetate-disodium-dihydrate'],
       ['bicar', 'sodium-bicarbonate'],
       ['magne', 'magnesium-sulfate-heptahydrate'],
-      ['calci', 'calcium-gluconate-monohydrate'],
+      ['calci', 'calcium-chloride-dihydrate'],
       ['pilo', 'pilocarpine-hydrochloride'],
       ['atro', 'atropine-sulfate-monohydrate'],
       ['lido', 'lidocaine-hydrochloride-monohydrate'],

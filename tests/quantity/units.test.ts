@@ -20,7 +20,7 @@ describe('units', () => {
     ['M', 'molarity', 'mol/L', 1],
     ['mM', 'molarity', 'mmol/L', 1e-3],
     ['µM', 'molarity', 'micromol/L', 1e-6],
-    ['IU', 'biological', 'units', 1],
+    ['units', 'biological', 'units', 1],
   ] as const)('%s is a %s written %s with the exact factor %d', (spelling, dimension, symbol, factor) => {
     expect(unitOf(spelling)).toEqual({ dimension, symbol, factor })
   })

@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest'
 import type { AmountKind } from '../../src/quantity/amount.ts'
 import type { Locale } from '../../src/quantity/locale.ts'
 import { readAmount } from '../../src/quantity/readAmount.ts'
-import { writeAmount } from '../../src/quantity/writeAmount.ts'
+import { printAmount, writeAmount } from '../../src/quantity/writeAmount.ts'
 
 const rewritten = (text: string, locale: Locale = 'en') => {
   const read = readAmount(text, locale)
@@ -23,6 +23,8 @@ const kinds: readonly Exclude<AmountKind, 'quantity-sufficient' | 'ratio'>[] = [
   'equivalents-per-volume',
   'moles-per-water-mass',
   'percent',
+  'units',
+  'units-per-volume',
 ]
 
 const positive = fc.oneof(
@@ -171,5 +173,9 @@ describe('writeAmount', () => {
       ),
       { numRuns: 200 },
     )
+  })
+
+  it('groups large numbers for print, as its docstring says', () => {
+    expect(printAmount({ kind: 'units', value: 10_000, text: '10000 units' })).toBe('10,000 units')
   })
 })

@@ -1,4 +1,6 @@
-import { lazy, Suspense, useDeferredValue } from 'react'
+import { lazy, Suspense, useDeferredValue, useState } from 'react'
+import { documentIds, type DocumentId } from '../../worksheet/types.ts'
+import { documentKinds, usualDocuments } from '../../worksheet/kinds.ts'
 import { InlineChoice } from '../common/InlineChoice.tsx'
 import { usePage, usePageActions } from '../state/context.tsx'
 import { printRefusal } from '../state/printing.ts'
@@ -19,6 +21,7 @@ export function SheetOnPaper() {
   const evaluation = usePage(currentEvaluation)
   const refusal = usePage(printRefusal)
   const isEmpty = usePage((state) => state.formula.lines.length === 0)
+  const [documents, setDocuments] = useState<readonly DocumentId[]>(usualDocuments)
   const drawn = useDeferredValue(evaluation)
   return (
     <>
@@ -26,16 +29,47 @@ export function SheetOnPaper() {
         <span>
           Paper <InlineChoice label="Paper size" value={paper} choices={papers} onChoose={actions.setPaper} />
         </span>
-        <PrintButton refusal={drawn === evaluation ? refusal : 'The sheet is being drawn.'} />
+        <DocumentChoice chosen={documents} onChoose={setDocuments} />
+        <PrintButton refusal={refusalOf(drawn === evaluation, documents, refusal)} />
       </div>
       {drawn !== null && drawn.status === 'ok' && !isEmpty ? (
         <Suspense fallback={<p className="soft small">Not a worksheet yet: it is being drawn.</p>}>
-          <SheetPreview evaluation={drawn} library={library} paper={paper} />
+          <SheetPreview evaluation={drawn} library={library} paper={paper} documents={documents} />
         </Suspense>
       ) : (
         <p className="print-only">Not a worksheet. {refusal}</p>
       )}
     </>
+  )
+}
+
+const refusalOf = (isDrawn: boolean, documents: readonly DocumentId[], refusal: string | null) => {
+  if (!isDrawn) return 'The sheet is being drawn.'
+  return refusal ?? (documents.length === 0 ? 'Choose what to print.' : null)
+}
+
+interface ChoiceProps {
+  readonly chosen: readonly DocumentId[]
+  onChoose(documents: readonly DocumentId[]): void
+}
+
+function DocumentChoice({ chosen, onChoose }: ChoiceProps) {
+  return (
+    <fieldset className="document-choice">
+      <legend className="unseen">What to print</legend>
+      {documentIds.map((id) => (
+        <label key={id}>
+          <input
+            type="checkbox"
+            checked={chosen.includes(id)}
+            onChange={({ currentTarget: { checked } }) =>
+              onChoose(documentIds.filter((other) => (other === id ? checked : chosen.includes(other))))
+            }
+          />
+          {documentKinds[id].name}
+        </label>
+      ))}
+    </fieldset>
   )
 }
 

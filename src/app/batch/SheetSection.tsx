@@ -1,6 +1,8 @@
 import type { ReactNode } from 'react'
 import type { FieldId } from '../state/fields.ts'
 import { useField } from '../state/useField.ts'
+import { usePage, usePageActions } from '../state/context.tsx'
+import { BenchEditor } from './BenchEditor.tsx'
 import { SheetOnPaper } from './SheetOnPaper.tsx'
 import './batch.css'
 
@@ -14,7 +16,10 @@ export function SheetSection() {
       <div className="sheet-fields no-print">
         <FieldGroup name="Batch">
           <BoxedField id="batchUnits" label="containers" empty="1" />
-          <BoxedField id="batchExcess" label="extra for the batch" empty="none, or 10 mL" />
+          <Overfill />
+          <BoxedField id="batchHoldUp" label="hold-up of filter, tubing" empty="none, or 5 mL" />
+          <BoxedField id="batchSamples" label="samples for tests" empty="none, or 2 * 5 mL" />
+          <BoxedField id="batchExcess" label="extra for losses" empty="none, or 10 mL" />
         </FieldGroup>
         <FieldGroup name="Order">
           <BoxedField id="orderNumber" label="order number" empty="blank on the sheet" />
@@ -30,6 +35,7 @@ export function SheetSection() {
           <BoxedField id="infusionRate" label="infusion rate" empty="not given, or 100 mL/h" />
         </FieldGroup>
       </div>
+      <BenchEditor />
       <SheetOnPaper />
     </section>
   )
@@ -41,6 +47,36 @@ function FieldGroup({ name, children }: { readonly name: string; readonly childr
       <legend className="small soft">{name}</legend>
       {children}
     </fieldset>
+  )
+}
+
+const overfills = [
+  { value: 'none', words: 'none' },
+  { value: 'mobile', words: 'as of a mobile liquid' },
+  { value: 'viscous', words: 'as of a viscous liquid' },
+] as const
+
+function Overfill() {
+  const { setOverfill } = usePageActions()
+  const chosen = usePage((state) => state.formula.batch?.overfill ?? 'none')
+  return (
+    <label className="boxed-field">
+      <span className="small">excess in each container</span>
+      <select
+        className="boxed-input"
+        value={chosen}
+        onChange={({ currentTarget: { value } }) => {
+          const choice = overfills.find((one) => one.value === value)
+          if (choice) setOverfill(choice.value)
+        }}
+      >
+        {overfills.map(({ value, words }) => (
+          <option key={value} value={value}>
+            {words}
+          </option>
+        ))}
+      </select>
+    </label>
   )
 }
 

@@ -25,7 +25,8 @@ export function AddRow({ row, onAdded }: Props) {
             invalid={false}
             find={find}
             onChoose={(candidate) => {
-              actions.addLine(candidate.id)
+              if (candidate.stock) actions.addStockLine(candidate.stock)
+              else actions.addLine(candidate.record ?? candidate.id)
               onAdded(row)
             }}
             onLeave={(text) => {

@@ -1,9 +1,11 @@
-import { useId } from 'react'
+import { lazy, Suspense, useId, useState } from 'react'
 import { Swatch } from '../axis/Patterns.tsx'
 import { usePageActions, useSearch } from '../state/context.tsx'
 import type { LineView } from '../state/lineViews.ts'
 import { AmountCell } from './AmountCell.tsx'
 import { IngredientSearch } from './IngredientSearch.tsx'
+
+const LineDetail = lazy(() => import('./LineDetail.tsx'))
 
 interface Props {
   readonly view: LineView
@@ -16,6 +18,7 @@ export function IngredientRow({ view, onChosen, onRemove }: Props) {
   const refusalId = useId()
   const factsId = useId()
   const { order, key, refusals } = view
+  const [open, setOpen] = useState(false)
   return (
     <>
       <tr role="row" className={refusals.length > 0 ? 'line line-refused' : 'line'}>
@@ -27,6 +30,7 @@ export function IngredientRow({ view, onChosen, onRemove }: Props) {
               {view.fromMemory && <em> from memory</em>}
             </span>
           )}
+          <MoreButton view={view} open={open} onToggle={() => setOpen(!open)} />
         </td>
         <td role="cell" className="amount-cell">
           <AmountCell view={view} describedBy={refusalId} />
@@ -47,6 +51,7 @@ export function IngredientRow({ view, onChosen, onRemove }: Props) {
           </button>
         </td>
       </tr>
+      {open && view.known && <DetailRow lineKey={key} />}
       {refusals.length > 0 && (
         <tr role="row" className="refusal-row">
           <td role="cell" colSpan={8} id={refusalId}>
@@ -59,6 +64,43 @@ export function IngredientRow({ view, onChosen, onRemove }: Props) {
         </tr>
       )}
     </>
+  )
+}
+
+function MoreButton({
+  view,
+  open,
+  onToggle,
+}: {
+  readonly view: LineView
+  readonly open: boolean
+  readonly onToggle: () => void
+}) {
+  if (!view.known) return null
+  return (
+    <button
+      type="button"
+      className="plain-button small more-button no-print"
+      tabIndex={-1}
+      data-more={view.order}
+      aria-expanded={open}
+      aria-label={`More about line ${view.order + 1}, ${view.name}`}
+      onClick={onToggle}
+    >
+      {open ? 'less' : 'form, lot, data'}
+    </button>
+  )
+}
+
+function DetailRow({ lineKey }: { readonly lineKey: string }) {
+  return (
+    <tr role="row" className="detail-row no-print">
+      <td role="cell" colSpan={8}>
+        <Suspense fallback={<p className="soft small">Opening…</p>}>
+          <LineDetail lineKey={lineKey} />
+        </Suspense>
+      </td>
+    </tr>
   )
 }
 
@@ -85,7 +127,7 @@ function NameCell({
         invalid={!view.known}
         find={find}
         onChoose={(candidate) => {
-          actions.setIngredient(view.key, candidate.id)
+          actions.setIngredient(view.key, candidate.record ?? candidate.id)
           onChosen(view.order)
         }}
         onLeave={(text) => actions.nameIngredient(view.key, text)}

@@ -3,7 +3,7 @@ import { usePage, usePageActions } from '../state/context.tsx'
 import { lineViews } from '../state/lineViews.ts'
 import { AddRow } from './AddRow.tsx'
 import { IngredientRow } from './IngredientRow.tsx'
-import { isTable, readPastedLines } from './pasteLines.ts'
+import { isTable, readPastedTable } from './pasteLines.ts'
 import { useGrid } from './useGrid.ts'
 import './ingredients.css'
 
@@ -19,7 +19,7 @@ export function IngredientTable() {
     const text = event.clipboardData.getData('text/plain')
     if (!isTable(text)) return
     event.preventDefault()
-    actions.addPasted(readPastedLines(text))
+    actions.addPasted(readPastedTable(text))
   }
   return (
     <>
@@ -50,8 +50,9 @@ export function IngredientTable() {
       </table>
       <p id={hint} className="small soft grid-hint no-print">
         <kbd>Enter</kbd> next line · arrows between cells · <kbd>F2</kbd> inside a cell · <kbd>Esc</kbd> as it
-        was · <kbd>Alt</kbd>+<kbd>↑</kbd>/<kbd>↓</kbd> move the line · <kbd>Ctrl</kbd>+<kbd>Delete</kbd>{' '}
-        remove it · rows copied from a spreadsheet can be pasted
+        was · <kbd>Alt</kbd>+<kbd>Enter</kbd> form, lot and data · <kbd>Alt</kbd>+<kbd>↑</kbd>/<kbd>↓</kbd>{' '}
+        move the line · <kbd>Ctrl</kbd>+<kbd>Delete</kbd> remove it · rows copied from a spreadsheet can be
+        pasted
       </p>
     </>
   )

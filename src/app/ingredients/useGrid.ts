@@ -60,6 +60,11 @@ export function useGrid(table: RefObject<HTMLTableElement | null>, lineCount: nu
   const onKeyDown = (event: KeyboardEvent) => {
     const place = placeOf(event.target)
     if (!place || !(event.target instanceof HTMLElement)) return
+    if (event.altKey && event.key === 'Enter') {
+      event.preventDefault()
+      table.current?.querySelector<HTMLElement>(`[data-more="${place.row}"]`)?.click()
+      return
+    }
     const wish = wishOf(event, { ...place, lastRow: lineCount, editing: editing.current })
     if (!wish) return
     event.preventDefault()

@@ -4,6 +4,8 @@ import { usePage, usePageActions } from '../state/context.tsx'
 import { runningAnswer } from '../state/runningAnswer.ts'
 import { useField } from '../state/useField.ts'
 import { DemoOrders } from './DemoOrders.tsx'
+import { ExportFold } from './ExportFold.tsx'
+import { KeepButton, ShelfButton } from './ShelfButtons.tsx'
 import { OpenFile } from './OpenFile.tsx'
 import './masthead.css'
 
@@ -38,9 +40,12 @@ function Menu() {
         New
       </button>
       <OpenFile />
+      <KeepButton />
+      <ShelfButton />
       <button type="button" className="plain-button" onClick={actions.saveFile}>
         Save as file
       </button>
+      <ExportFold />
       <DemoOrders />
       <a className="plain-button menu-print" href="#sheet">
         To the sheet

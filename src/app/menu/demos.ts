@@ -7,6 +7,8 @@ const names: Readonly<Record<string, string>> = {
   'nebuliser-solution': 'Nebuliser solution',
   'intravenous-electrolytes': 'Intravenous electrolytes',
   irrigation: 'Irrigation',
+  'low-dose-eye-drop': 'Low-dose eye drop',
+  'neonatal-infusion': 'Neonatal infusion',
 }
 
 export interface DemoOrder {

@@ -3,47 +3,52 @@ import type { Formula } from '../../formula/types.ts'
 
 export type Opened =
   | { readonly ok: true; readonly formula: Formula; readonly notices: readonly string[] }
-  | { readonly ok: false; readonly sentence: string }
+  | { readonly ok: false; readonly reason: string; readonly sentence: string }
 
-const refused = (name: string, reason: string): Opened => ({
+export const notOpened = (name: string, reason: string): Opened => ({
   ok: false,
+  reason,
   sentence: `“${name}” was not opened. ${reason} The sheet on the screen is unchanged.`,
 })
 
 /** Reads the text of a formula file; whatever is in it, the answer is a formula or a plain sentence. */
 export function openText(name: string, text: string): Opened {
   const read = readFormulaText(text)
-  return read.ok ? read : refused(name, `${read.refusal.message} ${read.refusal.wayOut}`)
+  return read.ok ? read : notOpened(name, `${read.refusal.message} ${read.refusal.wayOut}`)
 }
 
 /** The same for a file that was picked or dropped; a large one is refused before it is read. */
 export async function openFile(file: File): Promise<Opened> {
   if (file.size > longestDocument) {
-    return refused(file.name, 'The file is far too large to be a formula. Choose another file.')
+    return notOpened(file.name, 'The file is far too large to be a formula. Choose another file.')
   }
   try {
     return openText(file.name, await file.text())
   } catch {
-    return refused(file.name, 'This browser could not read it.')
+    return notOpened(file.name, 'This browser could not read it.')
   }
 }
 
 /** A file name made of the title's letters and digits. */
-export function fileName(title: string): string {
+export function fileName(title: string, ending = 'evenwater.json'): string {
   const plain = title
     .toLowerCase()
     .replace(/[^\p{L}\p{N}]+/gu, '-')
     .replace(/^-+|-+$/g, '')
     .slice(0, 60)
-  return `${plain || 'formula'}.evenwater.json`
+  return `${plain || 'formula'}.${ending}`
 }
 
 /** Hands the formula to the browser as a download. */
-export function saveAsFile(formula: Formula): void {
-  const address = URL.createObjectURL(new Blob([writeFormula(formula)], { type: 'application/json' }))
+export const saveAsFile = (formula: Formula): void =>
+  download(fileName(formula.title), 'application/json', writeFormula(formula))
+
+/** Hands a text to the browser as a file. */
+export function download(name: string, type: string, text: string): void {
+  const address = URL.createObjectURL(new Blob([text], { type }))
   const link = document.createElement('a')
   link.href = address
-  link.download = fileName(formula.title)
+  link.download = name
   link.click()
   setTimeout(() => URL.revokeObjectURL(address), 10_000)
 }

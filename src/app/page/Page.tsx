@@ -1,56 +1,59 @@
-import type { ReactNode } from 'react'
-import { AxisSection } from '../axis/AxisSection.tsx'
+import { lazy } from 'react'
 import { Patterns } from '../axis/Patterns.tsx'
-import { SheetSection } from '../batch/SheetSection.tsx'
-import { ParticleSection } from '../charts/ParticleSection.tsx'
-import { Guard } from '../common/Guard.tsx'
-import { Findings } from '../findings/Findings.tsx'
 import { IngredientTable } from '../ingredients/IngredientTable.tsx'
 import { Masthead } from '../menu/Masthead.tsx'
 import { Notices } from '../menu/Notices.tsx'
+import { NewVersion } from '../offline/NewVersion.tsx'
+import { OfflineLine } from '../offline/OfflineLine.tsx'
+import { OwnSection } from '../own/OwnSection.tsx'
 import { Order } from '../order/Order.tsx'
-import { Methods } from '../solution/Methods.tsx'
-import { Solution } from '../solution/Solution.tsx'
-import { usePage } from '../state/context.tsx'
+import { ShelfSection } from '../shelf/ShelfSection.tsx'
+import { SideBySideSection } from '../sidebyside/SideBySideSection.tsx'
+import { Calculated } from './Calculated.tsx'
+import { Guarded } from './Guarded.tsx'
 import { useUndoKeys } from './useUndoKeys.ts'
 import './page.css'
+
+const AxisSection = lazy(async () => ({ default: (await import('./Answers.tsx')).AxisSection }))
+const Answers = lazy(async () => ({ default: (await import('./Answers.tsx')).Answers }))
 
 /** The working sheet, in the order of the work. */
 export function Page() {
   useUndoKeys()
-  const revision = usePage((state) => state.revision)
-  const guarded = (what: string, part: ReactNode) => (
-    <Guard what={what} revision={revision}>
-      {part}
-    </Guard>
-  )
   return (
     <div className="page">
       <Patterns />
       <Masthead />
       <Notices />
+      <NewVersion />
       <main>
+        <Guarded what="The shelf">
+          <ShelfSection />
+        </Guarded>
+        <Guarded what="The comparison side by side">
+          <SideBySideSection />
+        </Guarded>
         <section className="section no-print" aria-labelledby="order">
           <h2 id="order">The order</h2>
           <Order />
         </section>
-        {guarded('The osmolality axis', <AxisSection />)}
+        <Guarded what="The osmolality axis">
+          <Calculated className="awaited-axis no-print">
+            <AxisSection />
+          </Calculated>
+        </Guarded>
         <section className="section no-print" aria-labelledby="ingredients">
           <h2 id="ingredients">Ingredients</h2>
           <IngredientTable />
         </section>
-        <div className="section answers no-print">
-          {guarded('The account of the solution', <Solution />)}
-          <div>
-            {guarded('The comparison of methods', <Methods />)}
-            {guarded('The chart of particles', <ParticleSection />)}
-          </div>
-        </div>
-        <section className="section no-print" aria-labelledby="watch">
-          <h2 id="watch">What to watch</h2>
-          {guarded('The list of what to watch', <Findings />)}
-        </section>
-        {guarded('The sheet', <SheetSection />)}
+        <Guarded what="The shelf of your own">
+          <OwnSection />
+        </Guarded>
+        <Guarded what="What follows from the order">
+          <Calculated className="awaited" isOnPaper>
+            <Answers />
+          </Calculated>
+        </Guarded>
       </main>
       <Footer />
     </div>
@@ -66,6 +69,7 @@ function Footer() {
         stands here.
       </p>
       <p>Nothing leaves this machine: no account, no server, no counting of visits.</p>
+      <OfflineLine />
     </footer>
   )
 }

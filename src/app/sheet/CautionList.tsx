@@ -18,11 +18,12 @@ const Caution = ({ caution }: { readonly caution: SheetCaution }) => (
   <li data-severity={caution.severity}>
     <strong>{words[caution.severity]}</strong>
     <span>
-      {caution.text} {caution.wayOut} <small>{caution.source}</small>
+      {caution.text} {caution.wayOut}
+      {caution.source && <small> {caution.source}</small>}
       {caution.acceptedBecause !== null && (
         <span className="paper-accepted">Accepted in writing: {caution.acceptedBecause}</span>
       )}
     </span>
-    <span className="paper-initials">read, initials</span>
+    <span className="paper-initials">read by</span>
   </li>
 )

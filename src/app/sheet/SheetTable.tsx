@@ -1,6 +1,4 @@
-import type { SheetCell, SheetSection } from '../../worksheet/types.ts'
-
-type Table = Extract<SheetSection, { kind: 'table' }>
+import type { SheetCell, SheetTable as Table } from '../../worksheet/types.ts'
 
 /** A ruled table; its head is repeated on each page. */
 export function SheetTable({ table }: { readonly table: Table }) {
@@ -10,8 +8,8 @@ export function SheetTable({ table }: { readonly table: Table }) {
         <caption className="unseen">{table.heading}</caption>
         <thead>
           <tr>
-            {table.columns.map(({ label, align, blank }) => (
-              <th key={label} scope="col" data-align={align} data-blank={blank || undefined}>
+            {table.columns.map(({ label, align, blank, room }) => (
+              <th key={label} scope="col" data-align={align} data-blank={blank || undefined} data-room={room}>
                 {label}
               </th>
             ))}
@@ -25,6 +23,7 @@ export function SheetTable({ table }: { readonly table: Table }) {
                   key={table.columns[column]?.label ?? column}
                   entry={entry}
                   first={column === 0}
+                  strong={table.columns[column]?.strong ?? false}
                   align={table.columns[column]?.align ?? 'start'}
                 />
               ))}
@@ -40,10 +39,11 @@ export function SheetTable({ table }: { readonly table: Table }) {
 interface EntryProps {
   readonly entry: SheetCell
   readonly first: boolean
+  readonly strong: boolean
   readonly align: string
 }
 
-function Entry({ entry, first, align }: EntryProps) {
+function Entry({ entry, first, strong, align }: EntryProps) {
   const content = (
     <>
       {entry.text}
@@ -51,7 +51,7 @@ function Entry({ entry, first, align }: EntryProps) {
     </>
   )
   return first ? (
-    <th scope="row" data-align={align}>
+    <th scope="row" data-align={align} data-strong={strong || undefined}>
       {content}
     </th>
   ) : (

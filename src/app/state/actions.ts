@@ -1,92 +1,25 @@
-import type { Command } from '../../formula/commands.ts'
-import { longestAmount, longestText, mostLines } from '../../formula/schema.ts'
-import type { Formula, RouteId } from '../../formula/types.ts'
+import type { Bench, Formula, RouteId } from '../../formula/types.ts'
 import { openFile, openText, saveAsFile, type Opened } from '../menu/files.ts'
 import type { DemoOrder } from '../menu/demos.ts'
 import { usualTarget, type TargetChoice } from '../words/order.ts'
-import type { PastedLine } from '../ingredients/pasteLines.ts'
 import { cellCommands, cellId, type Cell } from './cells.ts'
-import { drop, perform, redo, undo, type Desk } from './history.ts'
-import { calledExactly } from './search.ts'
-import type { PageState, PageStore, Paper } from './store.ts'
-
-interface Tools {
-  readonly store: PageStore
-  /** A key that no line of any document has. */
-  readonly newKey: () => string
-  readonly emptyFormula: () => Formula
-}
+import { changeDesk, doOnce, once, type Tools } from './deskChanges.ts'
+import { batchCommand } from './fields.ts'
+import { drop, perform, redo, undo } from './history.ts'
+import { addingActions, lineActions } from './lineActions.ts'
+import type { PageStore, Paper } from './store.ts'
 
 export type Actions = ReturnType<typeof pageActions>
 
 /** Everything a hand can do to the page. Nothing else changes the document. */
 export function pageActions(tools: Tools) {
   return {
+    ...addingActions(tools),
     ...lineActions(tools),
     ...cellActions(tools),
     ...orderActions(tools),
     ...documentActions(tools),
     ...noticeActions(tools),
-  }
-}
-
-let intentions = 0
-/** An intention of its own: never joined with the step before. */
-const once = (what: string) => `${what} ${(intentions += 1)}`
-
-function changeDesk(store: PageStore, change: (desk: Desk) => Desk, rest: Partial<PageState> = {}): void {
-  const state = store.getState()
-  const { formula, past, future } = change(state)
-  const changed = formula !== state.formula || rest.drafts !== undefined
-  store.setState({ formula, past, future, revision: state.revision + (changed ? 1 : 0), ...rest })
-}
-
-const doOnce = (store: PageStore, what: string, commands: readonly Command[]) => {
-  if (commands.length > 0) changeDesk(store, (desk) => perform(desk, once(what), commands))
-}
-
-function lineActions({ store, newKey }: Tools) {
-  const idOf = (text: string) =>
-    calledExactly(store.getState().library, text)?.id ?? text.slice(0, longestText)
-  /** Adds at the end, in one step, as many as a document holds; what does not fit is said. */
-  const append = (added: readonly PastedLine[]) => {
-    const from = store.getState().formula.lines.length
-    const fitting = added.slice(0, mostLines - from)
-    if (fitting.length < added.length) {
-      store.setState({ notice: `A formula holds ${mostLines} lines; what came after them was not added.` })
-    }
-    doOnce(
-      store,
-      'add lines',
-      fitting.map(({ name, amount }, index) => ({
-        kind: 'add-line',
-        line: { key: newKey(), ingredient: idOf(name), amount: amount.slice(0, longestAmount) },
-        index: from + index,
-      })),
-    )
-  }
-  return {
-    addLine: (ingredient: string) => append([{ name: ingredient, amount: '' }]),
-    /** Rows of a spreadsheet; a name that is not known stays as it was written. */
-    addPasted: append,
-    removeLine(key: string) {
-      doOnce(store, 'remove line', [{ kind: 'remove-line', key }])
-    },
-    moveLine(key: string, by: 1 | -1) {
-      const { lines } = store.getState().formula
-      const to = lines.findIndex((line) => line.key === key) + by
-      if (to < 0 || to >= lines.length) return
-      doOnce(store, 'move line', [{ kind: 'move-line', key, to }])
-    },
-    setIngredient(key: string, ingredient: string) {
-      doOnce(store, 'set ingredient', [{ kind: 'set-ingredient', key, ingredient }])
-    },
-    /** What was typed in an ingredient cell and left: a known name is taken, anything else stays in sight and blocks. */
-    nameIngredient(key: string, text: string) {
-      const line = store.getState().formula.lines.find((candidate) => candidate.key === key)
-      if (!line || text === '' || line.ingredient === idOf(text)) return
-      doOnce(store, 'set ingredient', [{ kind: 'set-ingredient', key, ingredient: idOf(text) }])
-    },
   }
 }
 
@@ -134,6 +67,15 @@ function orderActions({ store }: Tools) {
       const value = choice === 'none' ? undefined : { quantity: choice, value: usualTarget[choice] }
       doOnce(store, 'set target', [{ kind: 'set-field', field: 'target', value }])
     },
+    setOverfill(overfill: 'none' | 'mobile' | 'viscous') {
+      const change = { overfill: overfill === 'none' ? ('' as const) : overfill }
+      doOnce(store, 'set overfill', [batchCommand(store.getState().formula, change)])
+    },
+    /** Balances and measures; an empty bench is none. */
+    setBench(bench: Bench) {
+      const isEmpty = (bench.balances ?? []).length === 0 && (bench.measures ?? []).length === 0
+      doOnce(store, 'set bench', [{ kind: 'set-field', field: 'bench', value: isEmpty ? undefined : bench }])
+    },
     setPaper(paper: Paper) {
       store.setState({ paper })
     },
@@ -148,7 +90,7 @@ function orderActions({ store }: Tools) {
   }
 }
 
-function documentActions({ store, emptyFormula }: Tools) {
+function documentActions({ store, emptyFormula, newKey }: Tools) {
   /** A whole document in one step; undo brings the old one back. */
   const replace = (formula: Formula) =>
     changeDesk(store, (desk) => perform(desk, once('replace'), [{ kind: 'replace-all', formula }]), {
@@ -166,7 +108,11 @@ function documentActions({ store, emptyFormula }: Tools) {
   return {
     undo: () => stepBack(store),
     redo: () => changeDesk(store, redo, { drafts: {}, typing: null }),
-    startNew: () => replace(emptyFormula()),
+    /** The bench stays: it belongs to the place, not to the formula. */
+    startNew() {
+      const { bench } = store.getState().formula
+      replace({ ...emptyFormula(), ...(bench ? { bench } : {}) })
+    },
     async openFile(file: File) {
       take(await openFile(file))
     },
@@ -182,7 +128,15 @@ function documentActions({ store, emptyFormula }: Tools) {
         })
       }
     },
+    /** The text of a formula file, pasted. */
+    openPastedText: (text: string) => take(openText('the pasted text', text)),
     replaceDocument: replace,
+    /** A formula that differs in some lines, in one step; lines that were made elsewhere get keys of their own. */
+    putLines(next: Formula) {
+      const known = new Set(store.getState().formula.lines.map(({ key }) => key))
+      const lines = next.lines.map((line) => (known.has(line.key) ? line : { ...line, key: newKey() }))
+      replace({ ...next, lines })
+    },
   }
 }
 

@@ -1,6 +1,8 @@
 import { createContext, useContext, type ReactNode } from 'react'
 import { useStore } from 'zustand'
 import type { Candidate } from './search.ts'
+import type { ShelfActions } from '../shelf/actions.ts'
+import type { ShelfState } from '../shelf/shelfDesk.ts'
 import type { Page, PageState } from './store.ts'
 
 const PageContext = createContext<Page | null>(null)
@@ -22,3 +24,9 @@ export const usePageActions = (): Page['actions'] => useOwnPage().actions
 
 /** Finds library ingredients by what is typed. */
 export const useSearch = (): ((text: string) => readonly Candidate[]) => useOwnPage().search
+
+/** A piece of what is known of the shelf. */
+export const useShelf = <T,>(select: (state: ShelfState) => T): T =>
+  useStore(useOwnPage().shelf.store, select)
+
+export const useShelfActions = (): ShelfActions => useOwnPage().shelf.actions

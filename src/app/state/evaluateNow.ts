@@ -5,7 +5,7 @@ import type { PageStore } from './store.ts'
 
 export type Evaluate = (formula: Formula, library: Library) => Evaluation
 
-interface Clock {
+export interface Clock {
   now(): number
   nextFrame(run: () => void): void
 }

@@ -1,5 +1,5 @@
 import type { Command } from '../../formula/commands.ts'
-import type { Formula } from '../../formula/types.ts'
+import type { Batch, Formula } from '../../formula/types.ts'
 import type { Read } from '../../quantity/amount.ts'
 import { readAmount } from '../../quantity/readAmount.ts'
 import { readReadability, readTarget, readTemperature, readVolume } from '../../quantity/readMeasure.ts'
@@ -15,6 +15,8 @@ export const fieldLabels = {
   target: 'the target',
   batchUnits: 'the number of containers',
   batchExcess: 'the extra for the batch',
+  batchHoldUp: 'the hold-up of filter and tubing',
+  batchSamples: 'the samples',
   orderNumber: 'the order number',
   lot: 'the lot',
   masterRecord: 'the master record',
@@ -58,8 +60,9 @@ export function fieldText(formula: Formula, field: FieldId): string {
   if (field === 'pH') return numberText(formula.pH)
   if (field === 'target') return formula.target?.value ?? ''
   if (field === 'batchUnits') return numberText(formula.batch?.units)
-  if (field === 'batchExcess') return formula.batch?.excess ?? ''
-  return formula[field] ?? ''
+  const part = batchPart(field)
+  if (part) return formula.batch?.[part] ?? ''
+  return formula[field as TopText] ?? ''
 }
 
 const ranges: Readonly<Partial<Record<FieldId, readonly [low: number, high: number]>>> = {
@@ -93,7 +96,7 @@ export function fieldCommand(formula: Formula, field: FieldId, text: string): Co
   const value = isEmpty ? undefined : readNumber(field, text)
   if (value === null) return null
   if (field === 'pH') return { kind: 'set-field', field: 'pH', value }
-  if (field === 'batchUnits') return batchCommand(value ?? 1, formula.batch?.excess)
+  if (field === 'batchUnits') return batchCommand(formula, { units: value ?? 1 })
   return { kind: 'set-field', field: 'patient', value: present({ ...formula.patient, [field]: value }) }
 }
 
@@ -108,17 +111,33 @@ function textCommand(formula: Formula, field: FieldId, text: string): Command {
     const quantity = formula.target?.quantity ?? 'osmolality'
     return { kind: 'set-field', field: 'target', value: { quantity, value: text } }
   }
-  if (field === 'batchExcess') return batchCommand(formula.batch?.units ?? 1, text)
+  const part = batchPart(field)
+  if (part) return batchCommand(formula, { [part]: text })
   const value = text === '' && !neverAbsent.has(field) ? undefined : text
   return { kind: 'set-field', field: field as TopText, value }
 }
 
-/** One container without extra is no batch of its own. */
-function batchCommand(units: number, excess: string | undefined): Command {
-  const hasExcess = excess !== undefined && excess !== ''
-  const value = units === 1 && !hasExcess ? undefined : { units, ...(hasExcess ? { excess } : {}) }
-  return { kind: 'set-field', field: 'batch', value }
+/** One container without anything beside it is no batch of its own. */
+export function batchCommand(
+  { batch }: Formula,
+  change: { readonly [Part in keyof Batch]?: Batch[Part] | '' },
+): Command {
+  const { units = 1, ...parts } = { ...batch, ...change } as Batch
+  const value = present({ ...parts })
+  return {
+    kind: 'set-field',
+    field: 'batch',
+    value: units === 1 && value === undefined ? undefined : { units, ...value },
+  }
 }
+
+type BatchText = 'excess' | 'holdUp' | 'samples'
+const batchTexts: Readonly<Partial<Record<FieldId, BatchText>>> = {
+  batchExcess: 'excess',
+  batchHoldUp: 'holdUp',
+  batchSamples: 'samples',
+}
+const batchPart = (field: FieldId): BatchText | undefined => batchTexts[field]
 
 const numberWays: Readonly<Partial<Record<FieldId, string>>> = {
   pH: 'Write a pH between 0 and 14 with a point, such as 6.8, or leave it empty.',
@@ -134,6 +153,8 @@ const readers: Readonly<Partial<Record<FieldId, (text: string) => Read<unknown>>
   temperature: (text) => readTemperature(text),
   balance: (text) => readReadability(text),
   batchExcess: (text) => readVolume(text),
+  batchHoldUp: (text) => readVolume(text),
+  batchSamples: (text) => readVolume(text),
   doseVolume: (text) => readVolume(text),
 }
 

@@ -15,7 +15,7 @@ export interface Desk {
   readonly future: readonly Step[]
 }
 
-const mostSteps = 1000
+export const mostSteps = 1000
 
 interface Applied {
   readonly formula: Formula

@@ -14,8 +14,14 @@ const words = { stop: 'stop', warn: 'warning', note: 'note' } as const
 
 /** The answer in one line, for the masthead. */
 export const runningAnswer = viewOf(
-  (state) => [currentEvaluation(state), findingViews(state)] as const,
-  (evaluation, findings): RunningAnswer => {
+  (state) =>
+    [
+      currentEvaluation(state),
+      findingViews(state),
+      state.calculation === 'coming' && state.failure === null,
+    ] as const,
+  (evaluation, findings, isComing): RunningAnswer => {
+    if (isComing) return { number: '—', words: 'calculating', watch: '' }
     const counted = (['stop', 'warn', 'note'] as const).flatMap((severity) => {
       const count = findings.filter((finding) => finding.severity === severity).length
       return count === 0 ? [] : [`${count} ${words[severity]}${count === 1 ? '' : 's'}`]

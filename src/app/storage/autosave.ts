@@ -1,6 +1,7 @@
 import { writeFormula } from '../../formula/document.ts'
 import type { Formula } from '../../formula/types.ts'
 import { openText } from '../menu/files.ts'
+import { lineageOf, originOf, type Origin } from '../shelf/origin.ts'
 import type { PageState, PageStore, Paper } from '../state/store.ts'
 import type { Desk } from './desk.ts'
 import { refusalSentence, type KeptSheet, type Shelf } from './shelf.ts'
@@ -21,14 +22,17 @@ export interface Autosave {
   /** Shows what the other window keeps; this window's sheet is one undo away. */
   takeOther(): Promise<void>
   settled(): Promise<void>
+  /** Whether this window keeps the sheet, once that is known for the first time. */
+  seatKnown: Promise<boolean>
 }
 
 /** What is written stands for this state; the same object of formula is written once. */
-const asKept = ({ formula, drafts, paper }: PageState, stamp: string): KeptSheet => ({
-  document: writeFormula(formula),
-  drafts,
-  paper,
+const asKept = (state: PageState, stamp: string): KeptSheet => ({
+  document: writeFormula(state.formula),
+  drafts: state.drafts,
+  paper: state.paper,
   stamp,
+  origin: originOf(state),
 })
 
 /** Keeps every change, one window at a time, and says so when it cannot. */
@@ -36,6 +40,10 @@ export function startAutosave(tools: Tools, loadedStamp: string | null): Autosav
   const { store, shelf, desk, newStamp } = tools
   let seated = false
   let stamp = loadedStamp
+  let tellSeat: (hasSeat: boolean) => void = () => undefined
+  const seatKnown = new Promise<boolean>((resolve) => {
+    tellSeat = resolve
+  })
 
   const writer = promptWriter<KeptSheet>(
     (sheet) => shelf.write(sheet),
@@ -59,10 +67,14 @@ export function startAutosave(tools: Tools, loadedStamp: string | null): Autosav
   }
   store.subscribe((state, before) => {
     const changed =
-      state.formula !== before.formula || state.drafts !== before.drafts || state.paper !== before.paper
+      state.formula !== before.formula ||
+      state.drafts !== before.drafts ||
+      state.paper !== before.paper ||
+      state.origins !== before.origins
     if (changed && seated) keep()
   })
   desk.sit((hasSeat) => {
+    tellSeat(hasSeat)
     if (!hasSeat) {
       seated = false
       store.setState({ keeping: { kind: 'elsewhere', freed: false } })
@@ -75,9 +87,11 @@ export function startAutosave(tools: Tools, loadedStamp: string | null): Autosav
       if (other.kind !== 'kept') return
       stamp = other.stamp
       tools.replaceDocument(other.formula)
+      store.setState((state) => ({ origins: { ...state.origins, [lineageOf(state)]: other.origin } }))
       takeSeat()
     },
     settled: () => writer.settled(),
+    seatKnown,
   }
 }
 
@@ -103,6 +117,7 @@ export interface Kept {
   readonly drafts: Readonly<Record<string, string>>
   readonly paper: Paper | null
   readonly stamp: string
+  readonly origin: Origin | null
 }
 
 export type ReadKept =
@@ -122,7 +137,8 @@ export async function readKept(shelf: Shelf): Promise<ReadKept> {
       return { kind: 'unreadable', sentence }
     }
     const paper = sheet.paper === 'A4' || sheet.paper === 'Letter' ? sheet.paper : null
-    return { kind: 'kept', formula: opened.formula, drafts: sheet.drafts, paper, stamp: sheet.stamp }
+    const { drafts, stamp, origin = null } = sheet
+    return { kind: 'kept', formula: opened.formula, drafts, paper, stamp, origin }
   } catch {
     return { kind: 'nothing' }
   }

@@ -1,4 +1,5 @@
 import { createStore, get, promisifyRequest, type UseStore } from 'idb-keyval'
+import type { Origin } from '../shelf/origin.ts'
 
 /** What is kept of the sheet on the desk: the document as text and whatever could not be taken from its cells. */
 export interface KeptSheet {
@@ -7,6 +8,8 @@ export interface KeptSheet {
   readonly paper: string
   /** Names this very state, so that another window's work is recognised. */
   readonly stamp: string
+  /** Where on the shelf it comes from. */
+  readonly origin?: Origin | null
 }
 
 export interface Shelf {
@@ -40,13 +43,19 @@ const putPromptly = (store: UseStore, at: string, sheet: KeptSheet): Promise<voi
 
 function keptSheet(value: unknown): KeptSheet | undefined {
   if (typeof value !== 'object' || value === null) return undefined
-  const { document, drafts, paper, stamp } = value as Partial<Record<keyof KeptSheet, unknown>>
+  const { document, drafts, paper, stamp, origin } = value as Partial<Record<keyof KeptSheet, unknown>>
   if (typeof document !== 'string' || typeof stamp !== 'string' || typeof paper !== 'string') return undefined
   if (typeof drafts !== 'object' || drafts === null) return undefined
   const texts = Object.entries(drafts).filter(
     (entry): entry is [string, string] => typeof entry[1] === 'string',
   )
-  return { document, drafts: Object.fromEntries(texts), paper, stamp }
+  return { document, drafts: Object.fromEntries(texts), paper, stamp, origin: keptOrigin(origin) }
+}
+
+function keptOrigin(value: unknown): Origin | null {
+  if (typeof value !== 'object' || value === null) return null
+  const { id, version } = value as Partial<Record<keyof Origin, unknown>>
+  return typeof id === 'string' && typeof version === 'string' ? { id, version } : null
 }
 
 /** The plain sentence for a storage that refused. */

@@ -38,7 +38,7 @@ export function samplingActions(store: PageStore, makeWorker: () => Worker): Sam
         stop()
         store.setState({ sampling: failed })
       })
-      const order: SamplingOrder = { formula: store.getState().formula, draws, seed }
+      const order: SamplingOrder = { kind: 'sample', formula: store.getState().formula, draws, seed }
       worker.postMessage(order)
     },
   }

@@ -26,8 +26,7 @@ export interface Flat {
   }
   readonly psiThird: Int32Array
   readonly psiValue: Float64Array
-  /** The few different pairs of unlike charges, two numbers each. */
-  readonly mixings: Float64Array
+  readonly mixings: Mixings
   readonly neutrals: {
     readonly neutral: Int32Array
     readonly other: Int32Array
@@ -39,6 +38,16 @@ export interface Flat {
     readonly anion: Int32Array
     readonly zeta: Float64Array
   }
+}
+
+/** The few different pairs of unlike charges. J is asked once for each different product of two charges. */
+export interface Mixings {
+  /** z·z′ that J is asked for. */
+  readonly products: Float64Array
+  /** Of each pair, the places in `products` of z·z′, z·z and z′·z′. */
+  readonly cross: Int32Array
+  readonly first: Int32Array
+  readonly second: Int32Array
 }
 
 /** Lays the coefficients out once. */
@@ -74,8 +83,9 @@ export function flatten(compiled: Compiled): Flat {
   }
 }
 
-function flattenLikes({ likes }: Compiled): Pick<Flat, 'likes' | 'psiThird' | 'psiValue' | 'mixings'> {
-  const keyOf = (charges: readonly [number, number]) => `${Math.min(...charges)} ${Math.max(...charges)}`
+function flattenLikes(compiled: Compiled): Pick<Flat, 'likes' | 'psiThird' | 'psiValue' | 'mixings'> {
+  // A pair of equal charges without parameters adds nothing.
+  const likes = compiled.likes.filter(({ theta, charges, psi }) => theta !== 0 || charges || psi.length > 0)
   const keys = [...new Set(likes.flatMap(({ charges }) => (charges ? [keyOf(charges)] : [])))]
   const starts = [0]
   for (const { psi } of likes) starts.push((starts.at(-1) ?? 0) + psi.length)
@@ -89,6 +99,20 @@ function flattenLikes({ likes }: Compiled): Pick<Flat, 'likes' | 'psiThird' | 'p
     },
     psiThird: Int32Array.from(likes.flatMap(({ psi }) => psi.map(([third]) => third))),
     psiValue: Float64Array.from(likes.flatMap(({ psi }) => psi.map(([, value]) => value))),
-    mixings: Float64Array.from(keys.flatMap((key) => key.split(' ').map(Number))),
+    mixings: mixingsOf(keys.map((key) => key.split(' ').map(Number))),
+  }
+}
+
+const keyOf = (charges: readonly [number, number]) => `${Math.min(...charges)} ${Math.max(...charges)}`
+
+function mixingsOf(pairs: readonly (readonly number[])[]): Mixings {
+  const products = [...new Set(pairs.flatMap(([p = 0, q = 0]) => [p * q, p * p, q * q]))]
+  const placeOf = (of: (p: number, q: number) => number) =>
+    Int32Array.from(pairs, ([p = 0, q = 0]) => products.indexOf(of(p, q)))
+  return {
+    products: Float64Array.from(products),
+    cross: placeOf((p, q) => p * q),
+    first: placeOf((p) => p * p),
+    second: placeOf((_, q) => q * q),
   }
 }

@@ -1,5 +1,5 @@
 import type { Flat } from './flat.ts'
-import { unlikeCharges } from './mixing.ts'
+import { unlikeCharges, type MixingWork } from './mixing.ts'
 import { equivalentsOf, pitzerB, strengthOf, type Workspace } from './model.ts'
 
 /* g(x) = 2(1 − (1 + x)e^−x)/x² and x²-scaled slope of B in Pitzer's B and B′. */
@@ -20,12 +20,15 @@ export function lnActivityCoefficients(
   out.fill(0)
   const ionic = strengthOf(m, flat.charges)
   const root = Math.sqrt(ionic)
-  for (let at = 0; at < work.exponentials.length; at += 1) {
-    work.exponentials[at] = Math.exp(-flat.alphas[at]! * root)
+  for (let at = 0; at < flat.alphas.length; at += 1) {
+    const x = flat.alphas[at]! * root
+    const exponential = Math.exp(-x)
+    work.g[at] = g(x, exponential)
+    work.gSlope[at] = gSlope(x, exponential)
   }
-  unlikeCharges(flat.mixings, ionic, slope, work.theta, work.change)
+  unlikeCharges(flat.mixings, ionic, slope, work.mixing)
   const limiting = -slope * (root / (1 + pitzerB * root) + (2 / pitzerB) * Math.log1p(pitzerB * root))
-  const f = limiting + pairTerms(m, out, flat, ionic, work) + likeTerms(m, out, flat, ionic, work)
+  const f = limiting + pairTerms(m, out, flat, ionic, work) + likeTerms(m, out, flat, ionic, work.mixing)
   moleculeTerms(m, out, flat)
   const c = commonTerm(m, flat)
   for (let at = 0; at < m.length; at += 1) {
@@ -43,40 +46,28 @@ function commonTerm(m: Float64Array, { pairs }: Flat): number {
 }
 
 /** Adds the pairs' own terms and answers their part of F. */
-function pairTerms(
-  m: Float64Array,
-  out: Float64Array,
-  flat: Flat,
-  ionic: number,
-  { exponentials }: Workspace,
-): number {
-  const { pairs, alphas } = flat
-  const root = Math.sqrt(ionic)
+function pairTerms(m: Float64Array, out: Float64Array, flat: Flat, ionic: number, work: Workspace): number {
+  const { pairs } = flat
   const z = equivalentsOf(m, flat.magnitudes)
   let f = 0
   for (let at = 0; at < pairs.cation.length; at += 1) {
     const cation = pairs.cation[at]!
     const anion = pairs.anion[at]!
     const first = pairs.alpha1[at]!
-    const x1 = alphas[first]! * root
-    let b = pairs.beta0[at]! + pairs.beta1[at]! * g(x1, exponentials[first]!)
-    let change = pairs.beta1[at]! * gSlope(x1, exponentials[first]!)
+    const second = pairs.alpha2[at]!
+    const beta1 = pairs.beta1[at]!
     const beta2 = pairs.beta2[at]!
-    if (beta2 !== 0) {
-      const second = pairs.alpha2[at]!
-      const x2 = alphas[second]! * root
-      b += beta2 * g(x2, exponentials[second]!)
-      change += beta2 * gSlope(x2, exponentials[second]!)
-    }
-    if (ionic > 0) f += (m[cation]! * m[anion]! * change) / ionic
+    const b = pairs.beta0[at]! + beta1 * work.g[first]! + beta2 * work.g[second]!
+    const change = beta1 * work.gSlope[first]! + beta2 * work.gSlope[second]!
+    f += m[cation]! * m[anion]! * change
     const both = 2 * b + z * pairs.c[at]!
     out[cation]! += m[anion]! * both
     out[anion]! += m[cation]! * both
   }
-  return f
+  return ionic > 0 ? f / ionic : 0
 }
 
-function likeTerms(m: Float64Array, out: Float64Array, flat: Flat, ionic: number, work: Workspace): number {
+function likeTerms(m: Float64Array, out: Float64Array, flat: Flat, ionic: number, work: MixingWork): number {
   const { likes, psiThird, psiValue } = flat
   let f = 0
   for (let at = 0; at < likes.first.length; at += 1) {
@@ -87,7 +78,7 @@ function likeTerms(m: Float64Array, out: Float64Array, flat: Flat, ionic: number
     let phi = 2 * likes.theta[at]!
     if (mixing >= 0) {
       phi += 2 * work.theta[mixing]!
-      if (ionic > 0) f += (product * work.change[mixing]!) / ionic
+      f += product * work.change[mixing]!
     }
     for (let place = likes.psiStart[at]!; place < likes.psiStart[at + 1]!; place += 1) {
       const third = psiThird[place]!
@@ -97,7 +88,7 @@ function likeTerms(m: Float64Array, out: Float64Array, flat: Flat, ionic: number
     out[first]! += m[second]! * phi
     out[second]! += m[first]! * phi
   }
-  return f
+  return ionic > 0 ? f / ionic : 0
 }
 
 function moleculeTerms(m: Float64Array, out: Float64Array, { neutrals, triples }: Flat): void {

@@ -5,7 +5,8 @@ import { compile } from './compiled.ts'
 import { debyeHueckelSlope } from './debye-hueckel.ts'
 import { flatten, type Flat } from './flat.ts'
 import { lnActivityCoefficients } from './ln-gamma.ts'
-import { unlikeCharges } from './mixing.ts'
+import { mixingWork, unlikeCharges, type MixingWork } from './mixing.ts'
+import { rayOf, type Ray } from './ray.ts'
 import { pairRemarks, type PairRemark } from './remarks.ts'
 import { mixtureUncertainty } from './uncertainty.ts'
 
@@ -24,6 +25,8 @@ export interface ActivityModel {
   ionicStrength(m: Float64Array): number
   osmotic(m: Float64Array): Osmotic
   osmolality(m: Float64Array): number
+  /** The same proportions at any strength. */
+  ray(m: Float64Array): Ray
   /** ln γ of each species, on the model's own single-ion scale. */
   lnGamma(m: Float64Array, out: Float64Array): void
   readonly missingPairs: readonly (readonly [string, string])[]
@@ -34,9 +37,11 @@ export interface ActivityModel {
 
 /** What the loops write to; one for each model, so a model serves one solve at a time. */
 export interface Workspace {
+  /** e^−x, and Pitzer's g and x²-scaled slope of it, of each different α. */
   readonly exponentials: Float64Array
-  readonly theta: Float64Array
-  readonly change: Float64Array
+  readonly g: Float64Array
+  readonly gSlope: Float64Array
+  readonly mixing: MixingWork
 }
 
 /** Pitzer's b, kg^½ mol^-½. */
@@ -57,8 +62,9 @@ export function compileActivityModel(
   const slope = debyeHueckelSlope(celsius)
   const work: Workspace = {
     exponentials: new Float64Array(flat.alphas.length),
-    theta: new Float64Array(flat.mixings.length / 2),
-    change: new Float64Array(flat.mixings.length / 2),
+    g: new Float64Array(flat.alphas.length),
+    gSlope: new Float64Array(flat.alphas.length),
+    mixing: mixingWork(flat.mixings),
   }
   const ids = species.map(({ id }) => id)
   return {
@@ -66,6 +72,7 @@ export function compileActivityModel(
     celsius,
     ionicStrength: (m) => strengthOf(m, flat.charges),
     osmolality: (m) => sumOf(m) + 2 * excess(m, flat, slope, work),
+    ray: (m) => rayOf(m, flat, slope, work),
     osmotic: (m) => osmotic(sumOf(m), excess(m, flat, slope, work)),
     lnGamma: (m, out) => lnActivityCoefficients(m, out, flat, slope, work),
     relativeUncertainty: (m) => mixtureUncertainty(m, compiled, celsius, loadEstimates()),
@@ -109,9 +116,11 @@ function excess(m: Float64Array, flat: Flat, slope: number, work: Workspace): nu
   const root = Math.sqrt(ionic)
   const { exponentials } = work
   for (let at = 0; at < exponentials.length; at += 1) exponentials[at] = Math.exp(-flat.alphas[at]! * root)
-  unlikeCharges(flat.mixings, ionic, slope, work.theta, work.change)
+  unlikeCharges(flat.mixings, ionic, slope, work.mixing)
   const limiting = (-slope * ionic * root) / (1 + pitzerB * root)
-  return limiting + pairExcess(m, flat, exponentials) + likeExcess(m, flat, work) + moleculeExcess(m, flat)
+  return (
+    limiting + pairExcess(m, flat, exponentials) + likeExcess(m, flat, work.mixing) + moleculeExcess(m, flat)
+  )
 }
 
 function pairExcess(m: Float64Array, { pairs, magnitudes }: Flat, exponentials: Float64Array): number {
@@ -130,7 +139,7 @@ function pairExcess(m: Float64Array, { pairs, magnitudes }: Flat, exponentials: 
 function likeExcess(
   m: Float64Array,
   { likes, psiThird, psiValue }: Flat,
-  { theta, change }: Workspace,
+  { theta, change }: MixingWork,
 ): number {
   let sum = 0
   for (let at = 0; at < likes.first.length; at += 1) {
@@ -150,7 +159,8 @@ function likeExcess(
 function moleculeExcess(m: Float64Array, { neutrals, triples }: Flat): number {
   let sum = 0
   for (let at = 0; at < neutrals.neutral.length; at += 1) {
-    const [neutral, other] = [neutrals.neutral[at]!, neutrals.other[at]!]
+    const neutral = neutrals.neutral[at]!
+    const other = neutrals.other[at]!
     sum += m[neutral]! * m[other]! * neutrals.lambda[at]! * (neutral === other ? 0.5 : 1)
   }
   for (let at = 0; at < triples.neutral.length; at += 1) {

@@ -18,6 +18,17 @@ export function limitingOsmoticCoefficient(
   return 1 - (slope * shape.chargeProduct * root) / (1 + b * root)
 }
 
+/** Growth of that osmotic coefficient with ln m. */
+export function limitingGrowth(
+  molality: number,
+  shape: { readonly strengthPerMolal: number; readonly chargeProduct: number },
+  slope: number,
+): number {
+  if (shape.chargeProduct === 0) return 0
+  const root = Math.sqrt(shape.strengthPerMolal * molality)
+  return (-slope * shape.chargeProduct * root) / (2 * (1 + b * root) ** 2)
+}
+
 /** Inverts an increasing osmolality by safeguarded fixed point: φ varies slowly. */
 export function invert(osmolality: number, initial: number, osmolalityAt: (m: number) => number): number {
   let molality = initial
@@ -28,4 +39,26 @@ export function invert(osmolality: number, initial: number, osmolalityAt: (m: nu
     molality = next
   }
   return molality
+}
+
+const mostSteps = 12
+/** A Newton step this small, in parts of the molality, leaves less than rounding behind. */
+const lastStep = 1e-9
+
+/** Osmolality and its slope at a molality, to out[0], out[1]. */
+export type Sloped = (molality: number, out: Float64Array) => void
+
+const sloped = new Float64Array(2)
+
+/** Inverts an increasing osmolality by Newton's steps; null where they do not settle at once. */
+export function invertQuickly(osmolality: number, initial: number, curve: Sloped): number | null {
+  let molality = initial
+  for (let round = 0; round < mostSteps; round += 1) {
+    curve(molality, sloped)
+    const step = (osmolality - sloped[0]!) / sloped[1]!
+    molality += step
+    if (!(molality > 0 && sloped[1]! > 0)) return null
+    if (Math.abs(step) <= lastStep * molality) return molality
+  }
+  return null
 }

@@ -1,16 +1,24 @@
-import type { NeutralCurve, PhiCurve } from '../../library/curves.ts'
-import { invert, type OsmoticCurve } from './curve.ts'
-
-const phi = ({ coefficients: [a1, a2, a3] }: PhiCurve, m: number) => 1 + m * (a1 + m * (a2 + m * a3))
+import type { NeutralCurve } from '../../library/curves.ts'
+import { invert, invertQuickly, type OsmoticCurve } from './curve.ts'
 
 /**
  * Curve of a molecular solute: its freezing fit below, its 25 °C fit at and above 25 °C, in between in proportion.
  */
-export function neutralCurve(curve: NeutralCurve, celsius: number): OsmoticCurve {
+export function neutralCurve({ freezing, at25 }: NeutralCurve, celsius: number): OsmoticCurve {
   const warm = Math.min(1, Math.max(0, celsius / 25))
-  const osmolalityAt = (m: number) => m * ((1 - warm) * phi(curve.freezing, m) + warm * phi(curve.at25, m))
+  const mixed = (place: 0 | 1 | 2) =>
+    (1 - warm) * freezing.coefficients[place] + warm * at25.coefficients[place]
+  const [a, b, c] = [mixed(0), mixed(1), mixed(2)]
+  const osmolalityAt = (m: number) => m * (1 + m * (a + m * (b + m * c)))
+  const withSlope = (m: number, out: Float64Array) => {
+    out[0] = m * (1 + m * (a + m * (b + m * c)))
+    out[1] = 1 + m * (2 * a + m * (3 * b + m * 4 * c))
+  }
   return {
     osmolalityAt,
-    molalityAt: (osmolality) => (osmolality <= 0 ? 0 : invert(osmolality, osmolality, osmolalityAt)),
+    molalityAt(osmolality) {
+      if (osmolality <= 0) return 0
+      return invertQuickly(osmolality, osmolality, withSlope) ?? invert(osmolality, osmolality, osmolalityAt)
+    },
   }
 }

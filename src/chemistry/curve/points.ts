@@ -2,7 +2,8 @@ import type { Conventions } from '../../library/conventions.ts'
 import type { Estimates } from '../../library/estimates.ts'
 import type { Datum, Ingredient, TabulatedEquivalent } from '../../library/types.ts'
 import type { SoluteShare } from '../types.ts'
-import type { EquivalentPoint, Shape } from './tabulated.ts'
+import { osmolalityAtDepression } from '../activity/freezing.ts'
+import { molalityOf, type EquivalentPoint, type Shape } from './tabulated.ts'
 
 export interface Known {
   readonly conventions: Conventions
@@ -17,8 +18,8 @@ export interface Points {
 const macromolecular: ReadonlySet<string> = new Set(['polymer', 'nonionic-surfactant'])
 
 /**
- * What is known of a solute's osmotic effect, best first: tabulated equivalents, the depression of a 1 % solution, its
- * ionic class; where nothing is known, bounds for a macromolecule or a trace. Null: not even bounds.
+ * What is known of a solute's osmotic effect, best first: tabulated equivalents, the depression of a 1 % solution,
+ * measured osmolalities, a measured van 't Hoff factor (taken at 1 %), its ionic class; where nothing is known, bounds for a macromolecule or a trace. Null: not even bounds.
  */
 export function pointsOf(ingredient: Ingredient, percent: number, known: Known): Points | null {
   const tabulated = ingredient.sodiumChlorideEquivalents
@@ -28,6 +29,8 @@ export function pointsOf(ingredient: Ingredient, percent: number, known: Known):
   const depression = ingredient.freezingPointDepression1Percent
   if (depression && depression.value > 0)
     return { points: [fromDepression(depression, known)], basis: 'tabulated-curve' }
+  const measured = fromMeasured(ingredient, known)
+  if (measured.length > 0) return { points: measured, basis: 'tabulated-curve' }
   return fromClass(ingredient, known) ?? bounds(ingredient, percent, known.estimates)
 }
 
@@ -36,6 +39,30 @@ const fromEquivalent = ({ atPercent, e }: TabulatedEquivalent, estimates: Estima
   sodiumChloridePercent: atPercent * e.value,
   relativeUncertainty: Math.max(e.uncertainty ?? 0, estimates.equivalentRounding.value) / e.value,
 })
+
+/** Points straight from measurements: osmometer readings, else a van 't Hoff factor. */
+function fromMeasured(ingredient: Ingredient, { conventions, estimates }: Known): readonly EquivalentPoint[] {
+  const { measuredOsmolality = [], measuredI, molarMass } = ingredient
+  const uncertaintyOf = ({ value, uncertainty = 0 }: Datum) =>
+    Math.max(uncertainty / value, estimates.measuredReading.value)
+  if (measuredOsmolality.length > 0) {
+    return measuredOsmolality.map(({ atPercent, osmolality }) => ({
+      percent: atPercent,
+      osmolalityOsmPerKg: osmolalityAtDepression(
+        (osmolality.value / 1000) * conventions.cryoscopicConstant.value,
+      ),
+      relativeUncertainty: uncertaintyOf(osmolality),
+    }))
+  }
+  if (!measuredI || !molarMass) return []
+  return [
+    {
+      percent: 1,
+      osmolalityOsmPerKg: measuredI.value * molalityOf(ingredient, 1),
+      relativeUncertainty: uncertaintyOf(measuredI),
+    },
+  ]
+}
 
 function fromDepression(depression: Datum, { conventions, estimates }: Known): EquivalentPoint {
   const { isotonicDepressionKelvin, isotonicSodiumChloridePercent } = conventions

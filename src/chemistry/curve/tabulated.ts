@@ -2,15 +2,20 @@ import { loadEstimates } from '../../library/estimates.ts'
 import type { Ingredient } from '../../library/types.ts'
 import { waterDensity } from '../activity/debye-hueckel.ts'
 import { specificVolume } from '../water/volume.ts'
-import { invert, limitingOsmoticCoefficient, type OsmoticCurve } from './curve.ts'
+import {
+  invert,
+  invertQuickly,
+  limitingGrowth,
+  limitingOsmoticCoefficient,
+  type OsmoticCurve,
+} from './curve.ts'
 
-/** One tabulated point: a solution of `percent` w/v is iso-osmotic with `sodiumChloridePercent` w/v. */
-export interface EquivalentPoint {
+/** One point: a solution of `percent` w/v is iso-osmotic with a sodium chloride solution, or has this osmolality itself. */
+export type EquivalentPoint = {
   readonly percent: number
-  readonly sodiumChloridePercent: number
   /** Relative standard uncertainty. */
   readonly relativeUncertainty: number
-}
+} & ({ readonly sodiumChloridePercent: number } | { readonly osmolalityOsmPerKg: number })
 
 export interface Shape {
   /** Ionic strength per molal of formula units. */
@@ -44,9 +49,11 @@ export function tabulatedCurve(
   slope: number,
 ): TabulatedCurve {
   const known = points
-    .map(({ percent, sodiumChloridePercent, relativeUncertainty }) => {
+    .map((point) => {
+      const { percent, relativeUncertainty } = point
       const molality = molalityOf(ingredient, percent)
-      const osmolality = sodiumChloride(sodiumChloridePercent)
+      const osmolality =
+        'osmolalityOsmPerKg' in point ? point.osmolalityOsmPerKg : sodiumChloride(point.sodiumChloridePercent)
       const count = osmolality / (limitingOsmoticCoefficient(molality, shape, slope) * molality)
       return { ln: Math.log(molality), count, relativeUncertainty }
     })
@@ -66,6 +73,7 @@ export function molalityOf(ingredient: Ingredient, percent: number): number {
 export function countAt({ points }: TabulatedCurve, molality: number): number {
   const first = points[0]
   if (!first) return Number.NaN
+  if (points.length === 1) return first.count
   const ln = Math.log(molality)
   let before = first
   for (const point of points) {
@@ -96,14 +104,38 @@ export function uncertaintyAt({ points, shape }: TabulatedCurve, molality: numbe
   return Math.hypot(relative, outside * drift)
 }
 
+/** Growth of the apparent count with ln m. */
+function growthAt({ points }: TabulatedCurve, molality: number): number {
+  if (points.length < 2) return 0
+  const ln = Math.log(molality)
+  let before = points[0]
+  for (const point of points) {
+    if (point.ln >= ln) {
+      return before && point !== before ? (point.count - before.count) / (point.ln - before.ln) : 0
+    }
+    before = point
+  }
+  return 0
+}
+
 /** The curve itself at a temperature, by its Debye–Hückel slope. */
 export function curveOf(table: TabulatedCurve, slope: number): OsmoticCurve {
+  const { shape } = table
   const osmolalityAt = (m: number) =>
-    m <= 0 ? 0 : countAt(table, m) * limitingOsmoticCoefficient(m, table.shape, slope) * m
+    m <= 0 ? 0 : countAt(table, m) * limitingOsmoticCoefficient(m, shape, slope) * m
+  const withSlope = (m: number, out: Float64Array) => {
+    const count = countAt(table, m)
+    const coefficient = limitingOsmoticCoefficient(m, shape, slope)
+    out[0] = count * coefficient * m
+    out[1] = (count + growthAt(table, m)) * coefficient + count * limitingGrowth(m, shape, slope)
+  }
   const typical = table.points[0]?.count ?? 1
   return {
     osmolalityAt,
-    molalityAt: (osmolality) =>
-      osmolality <= 0 ? 0 : invert(osmolality, osmolality / typical, osmolalityAt),
+    molalityAt(osmolality) {
+      if (osmolality <= 0) return 0
+      const start = osmolality / typical
+      return invertQuickly(osmolality, start, withSlope) ?? invert(osmolality, start, osmolalityAt)
+    },
   }
 }

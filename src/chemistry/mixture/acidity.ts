@@ -17,10 +17,13 @@ export function impliedIons(
  * Whether charge balance decides the pH: every ion of its own that a solute brings must be permanent (a quaternary
  * cation, no hydrogen in its name) or have its ionisation steps.
  */
-export const pHIsKnown = (solutes: readonly Solute[]): boolean => unknownAcidity(solutes).length === 0
+export const pHIsKnown = (solutes: readonly Pick<Solute, 'ingredient'>[]): boolean =>
+  unknownAcidity(solutes).length === 0
 
 /** Solutes whose own ions may take or give protons nobody knows how. */
-export function unknownAcidity(solutes: readonly Solute[]): readonly Solute[] {
+export function unknownAcidity<Item extends Pick<Solute, 'ingredient'>>(
+  solutes: readonly Item[],
+): readonly Item[] {
   return solutes.filter(({ ingredient }) => {
     if (ingredient.ownIonisation?.length) return false
     if (ingredient.tags.includes('ionisation-not-given')) return true

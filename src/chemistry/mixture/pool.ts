@@ -1,11 +1,15 @@
+import type { Ray } from '../activity/ray.ts'
 import type { Speciated } from '../speciation/types.ts'
 import type { Member } from './blend.ts'
 import type { ReadySystem } from './system.ts'
+import { componentTotals, type Ties } from './ties.ts'
 
 /** The ions and molecules that the interaction model takes together. */
 export interface Pool {
   /** In the order of the system's species; those that belong to a solute with its own curve are taken out. */
   readonly molalities: Float64Array
+  /** The pool alone in water at any strength. */
+  readonly ray: Ray
   readonly osmolalityOsmPerKg: number
   readonly sumOfMolalities: number
   readonly isPresent: boolean
@@ -19,74 +23,65 @@ const nothing = 1e-6
  * is left out, evenly over its species.
  */
 export function poolOf(
-  speciated: Speciated,
+  { molalities: all }: Speciated,
   outsidePool: Readonly<Record<string, number>>,
-  system: ReadySystem,
+  { ties, activity }: ReadySystem,
 ): Pool {
-  const { molalities: all } = speciated
   const molalities = Float64Array.from(all)
-  const outside = Object.entries(outsidePool)
-  if (outside.length > 0) {
-    const totals = componentTotals(speciated, system)
-    const kept = new Map(
-      outside.map(([component, amount]) => [
-        component,
-        Math.max(0, 1 - amount / (totals.get(component) ?? amount)),
-      ]),
-    )
-    system.componentsOf.forEach((components, index) => {
-      let keep = 1
-      for (const component of components) keep = Math.min(keep, kept.get(component) ?? 1)
-      molalities[index] = (all[index] ?? 0) * keep
-    })
+  const kept = keptShares(all, outsidePool, ties)
+  let sum = 0
+  for (let species = 0; species < molalities.length; species += 1) {
+    let keep = 1
+    for (let at = ties.starts[species]!; at < ties.starts[species + 1]!; at += 1) {
+      keep = Math.min(keep, kept[ties.component[at]!]!)
+    }
+    molalities[species]! *= keep
+    sum += molalities[species]!
   }
-  const osmotic = system.activity.osmotic(molalities)
+  const ray = activity.ray(molalities)
   return {
     molalities,
-    osmolalityOsmPerKg: osmotic.osmolalityOsmPerKg,
-    sumOfMolalities: osmotic.sumOfMolalities,
-    isPresent: osmotic.sumOfMolalities > nothing,
+    ray,
+    osmolalityOsmPerKg: ray.osmolality(1),
+    sumOfMolalities: sum,
+    isPresent: sum > nothing,
   }
 }
 
-/** mol per kg of water of each component, over all its species. */
-export function componentTotals(
-  { species, molalities }: Speciated,
-  { componentsOf }: ReadySystem,
-): ReadonlyMap<string, number> {
-  const totals = new Map<string, number>()
-  componentsOf.forEach((components, index) => {
-    components.forEach((component, place) => {
-      const record = species[index]
-      const count = place === 0 ? (record?.count ?? 1) : (record?.partners?.[place - 1]?.count ?? 1)
-      totals.set(component, (totals.get(component) ?? 0) + count * (molalities[index] ?? 0))
-    })
-  })
-  return totals
+/** Of each component the part that stays in the pool. */
+function keptShares(
+  all: Float64Array,
+  outsidePool: Readonly<Record<string, number>>,
+  ties: Ties,
+): Float64Array {
+  const totals = componentTotals(all, ties)
+  const kept = new Float64Array(totals.length).fill(1)
+  for (const component in outsidePool) {
+    const at = ties.componentAt.get(component)
+    if (at !== undefined) kept[at] = Math.max(0, 1 - outsidePool[component]! / totals[at]!)
+  }
+  return kept
 }
 
 /** The pool as one member of the mixture: scaled as a whole, at fixed proportions, until it has the osmolality. */
-export function poolMember(pool: Pool, { activity }: ReadySystem): Member {
-  const scaled = new Float64Array(pool.molalities.length)
-  const osmolalityAt = (factor: number) => {
-    for (let at = 0; at < scaled.length; at += 1) scaled[at] = (pool.molalities[at] ?? 0) * factor
-    return activity.osmolality(scaled)
-  }
+export function poolMember({ ray }: Pick<Pool, 'ray'>): Member {
+  // O grows nearly as a power of the scale: a secant in the logarithms settles in a few rounds.
   let factor = 1
+  let power = 1
   return {
     shareAt(osmolality) {
-      // O grows nearly as a power of the scale: a secant in the logarithms settles in a few rounds.
-      let power = 1
-      let before = { ln: 0, miss: 0 }
+      let before = 0
+      let step = 0
       for (let round = 0; round < 60; round += 1) {
-        const miss = Math.log(osmolalityAt(factor) / osmolality)
-        const ln = Math.log(factor)
-        if (round > 0 && ln !== before.ln) power = (miss - before.miss) / (ln - before.ln)
-        before = { ln, miss }
-        factor *= Math.exp(-miss / power)
+        const miss = Math.log(ray.osmolality(factor) / osmolality)
+        if (step !== 0) power = (before - miss) / step
+        before = miss
+        step = miss / power
+        factor *= Math.exp(-step)
         if (Math.abs(miss) <= 1e-13) return 1 / factor
       }
       factor = 1
+      power = 1
       return Number.NaN
     },
   }

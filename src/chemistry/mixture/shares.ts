@@ -1,13 +1,9 @@
 import type { SoluteShare } from '../types.ts'
-import { componentTotals } from './pool.ts'
 import type { Solute } from './solutes.ts'
 import type { ReadySystem } from './system.ts'
+import { componentTotals, type Ties } from './ties.ts'
 import { countAt } from '../curve/tabulated.ts'
 import type { Mixture } from './thermal.ts'
-
-/** Formula units as labelled, fully dissociated; null without a molecular formula. */
-export const formalCount = ({ ingredient: { releases, molarMass } }: Solute): number | null =>
-  releases && releases.length > 0 && molarMass ? releases.reduce((sum, { count }) => sum + count, 0) : null
 
 /**
  * Each solute's share of the osmolality: its share of the water, inside the pool by the particles that its components
@@ -19,9 +15,10 @@ export function sharesOf(
   system: ReadySystem,
 ): readonly SoluteShare[] {
   const particles = poolParticles(solutes, mixture, system)
-  const inPool = [...particles.values()].reduce((sum, count) => sum + count, 0)
-  const shares = solutes.map((solute) => {
-    const counted = solute.kind === 'pool' ? (particles.get(solute.key) ?? 0) : 0
+  let inPool = 0
+  for (const count of particles) inPool += count
+  const shares = solutes.map((solute, index) => {
+    const counted = particles[index] ?? 0
     const share =
       solute.kind === 'pool'
         ? (mixture.poolShare * counted) / (inPool || 1)
@@ -32,11 +29,11 @@ export function sharesOf(
 }
 
 function shareOf(solute: Solute, osmolalityOsmPerKg: number, particles: number): SoluteShare {
-  const { key, ingredient, molality } = solute
+  const { key, ingredient, molality, facts } = solute
   return {
     key,
     molality,
-    particlesFormal: formalCount(solute),
+    particlesFormal: facts.formalCount,
     particlesCounted: molality === 0 ? 0 : countedOf(solute, particles),
     effectiveI: molality === 0 ? 0 : osmolalityOsmPerKg / molality,
     osmolalityOsmPerKg,
@@ -76,50 +73,49 @@ function scaled(shares: readonly SoluteShare[], total: number): readonly SoluteS
   })
 }
 
-/** mol of particles per kg of water that each pool member ends up as; a particle joining two kinds counts half for each. */
+/**
+ * mol of particles per kg of water that each pool member ends up as, 0 for the other solutes; a particle joining two
+ * kinds counts half for each.
+ */
 function poolParticles(
   solutes: readonly Solute[],
-  { speciated, pool }: Mixture,
-  system: ReadySystem,
-): ReadonlyMap<string, number> {
-  const totals = componentTotals({ ...speciated, molalities: pool.molalities }, system)
-  const particles = new Map<string, number>()
+  { pool }: Mixture,
+  { ties }: ReadySystem,
+): readonly number[] {
+  const { starts, component, components } = ties
+  const totals = componentTotals(pool.molalities, ties)
+  const particles = new Float64Array(components.length)
   let free = 0
   let bound = 0
-  system.componentsOf.forEach((components, index) => {
-    const molality = pool.molalities[index] ?? 0
-    for (const component of components) {
-      const part = molality / components.length
-      if (component === 'proton') free += part
+  for (let species = 0; species < pool.molalities.length; species += 1) {
+    const first = starts[species]!
+    const end = starts[species + 1]!
+    const part = pool.molalities[species]! / (end - first)
+    for (let at = first; at < end; at += 1) {
+      if (component[at] === ties.proton) free += part
       else {
-        particles.set(component, (particles.get(component) ?? 0) + part)
+        particles[component[at]!]! += part
         bound += part
       }
     }
-  })
+  }
   const growth = bound > 0 ? 1 + free / bound : 1
-  return new Map(
-    solutes
-      .filter(({ kind }) => kind === 'pool')
-      .map((solute) => [solute.key, growth * ownParticles(solute, particles, totals, speciated)]),
+  return solutes.map((solute) =>
+    solute.kind === 'pool' ? growth * ownParticles(solute, particles, totals, ties) : 0,
   )
 }
 
 function ownParticles(
-  { ingredient, molality }: Solute,
-  particles: ReadonlyMap<string, number>,
-  totals: ReadonlyMap<string, number>,
-  { species }: Mixture['speciated'],
+  { facts, molality }: Solute,
+  particles: Float64Array,
+  totals: Float64Array,
+  { componentAt }: Ties,
 ): number {
   let sum = 0
-  for (const { species: id, count } of ingredient.releases ?? []) {
-    const record = species.find((candidate) => candidate.id === id)
-    if (!record || record.component === 'proton') continue
-    const held = [{ component: record.component, count: record.count }, ...(record.partners ?? [])]
-    for (const { component, count: units } of held) {
-      const total = totals.get(component) ?? 0
-      if (total > 0) sum += (molality * count * units * (particles.get(component) ?? 0)) / total
-    }
+  for (const { component, count } of facts.given) {
+    const at = componentAt.get(component) ?? -1
+    const total = totals[at] ?? 0
+    if (total > 0) sum += (molality * count * particles[at]!) / total
   }
   return sum
 }

@@ -6,6 +6,7 @@ import type { Ingredient, SpeciesRecord } from '../../library/types.ts'
 import { pointsOf, shapeOf, type Points } from '../curve/points.ts'
 import { tabulatedCurve, type SodiumChlorideOsmolality, type TabulatedCurve } from '../curve/tabulated.ts'
 import type { ChemistryProblem, Dissolved } from '../types.ts'
+import { chargesOf, formalCountOf, givenBy, type SoluteFacts } from './facts.ts'
 
 /** What the sorting of solutes needs of the library. */
 export interface SoluteParts {
@@ -24,6 +25,7 @@ interface Base {
   readonly ingredient: Ingredient
   /** mol (g without a molar mass) per kg of water. */
   readonly molality: number
+  readonly facts: SoluteFacts
 }
 
 /** How a solute enters the mixture. */
@@ -37,23 +39,36 @@ export type Solute =
  * from its tabulated values. A salt whose own pair has no parameters goes by its table when it has one.
  */
 export function soluteOf(
-  item: Dissolved,
+  { key, ingredient }: Dissolved,
   molality: number,
   percent: number,
+  facts: SoluteFacts,
   parts: SoluteParts,
 ): Solute | ChemistryProblem {
-  const { key, ingredient } = item
-  const base = { key, ingredient, molality }
-  const only = ingredient.releases?.length === 1 ? ingredient.releases[0] : undefined
-  const curve = only && parts.curves.get(only.species)
-  if (curve) return { ...base, kind: 'molecule', curve }
-  if (isInPool(ingredient, parts)) return { ...base, kind: 'pool' }
-  const points = pointsOf(ingredient, percent, parts)
-  if (points) {
-    const table = tableOf(ingredient, points, parts)
-    return { ...base, kind: 'table', table, basis: points.basis }
+  const { curve, table } = facts
+  if (curve) return { key, ingredient, molality, facts, kind: 'molecule', curve }
+  if (facts.isInPool) return { key, ingredient, molality, facts, kind: 'pool' }
+  // Bounds are for traces alone, so that they hang on the strength.
+  if (table && (table.basis !== 'bounded' || pointsOf(ingredient, percent, parts))) {
+    return { key, ingredient, molality, facts, kind: 'table', table: table.curve, basis: table.basis }
   }
   return { code: 'no-osmotic-data', values: { ingredient: ingredient.name }, keys: [key], fatal: true }
+}
+
+/** What is known of an ingredient whatever its amount. */
+export function factsOf(ingredient: Ingredient, parts: SoluteParts, mark: number): SoluteFacts {
+  const only = ingredient.releases?.length === 1 ? ingredient.releases[0] : undefined
+  const curve = only && parts.curves.get(only.species)
+  const inPool = isInPool(ingredient, parts)
+  return {
+    mark,
+    curve,
+    isInPool: inPool,
+    table: curve || inPool ? null : tableOf(ingredient, parts),
+    formalCount: formalCountOf(ingredient),
+    given: givenBy(ingredient, parts.species),
+    ...chargesOf(ingredient),
+  }
 }
 
 export const isProblem = (result: Solute | ChemistryProblem): result is ChemistryProblem => 'code' in result
@@ -71,16 +86,10 @@ function isInPool(ingredient: Ingredient, { species, electrolytes }: SoluteParts
   return complete || !hasTable
 }
 
-/* A table depends on the ingredient alone; the same one is asked for at every keystroke. */
-const tables = new WeakMap<
-  Ingredient,
-  { readonly slope: number; readonly basis: string; readonly table: TabulatedCurve }
->()
-
-function tableOf(ingredient: Ingredient, { points, basis }: Points, parts: SoluteParts): TabulatedCurve {
-  const known = tables.get(ingredient)
-  if (known && known.slope === parts.slope && known.basis === basis) return known.table
-  const table = tabulatedCurve(ingredient, points, shapeOf(ingredient), parts.sodiumChloride, parts.slope)
-  tables.set(ingredient, { slope: parts.slope, basis, table })
-  return table
+function tableOf(ingredient: Ingredient, parts: SoluteParts): SoluteFacts['table'] {
+  const known = pointsOf(ingredient, 0, parts)
+  if (!known) return null
+  const { points, basis } = known
+  const curve = tabulatedCurve(ingredient, points, shapeOf(ingredient), parts.sodiumChloride, parts.slope)
+  return { curve, basis }
 }

@@ -40,7 +40,7 @@ export function mix(
     shareAt: (osmolality) => molality / curve.molalityAt(osmolality),
   }))
   const hasPool = pool.isPresent
-  const member = poolMember(pool, system)
+  const member = poolMember(pool)
   if (hasPool) members.push(member)
   const guess = curves.reduce(
     (sum, { molality, curve }) => sum + curve.osmolalityAt(molality),
@@ -93,7 +93,7 @@ export function osmolalityWithErrors({ solutes, mixture, system }: Movable, erro
     members.push({ shareAt: (osmolality) => molality / curve.molalityAt(osmolality / factor) })
   }
   if (mixture.pool.isPresent) {
-    const pool = poolMember(mixture.pool, system)
+    const pool = poolMember(mixture.pool)
     let amount = errors.everyAmount
     for (const [key, share] of errors.poolShares)
       amount += errors.everyAmount * share * ((errors.amount.get(key) ?? 1) - 1)

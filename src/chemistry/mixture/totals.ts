@@ -1,4 +1,3 @@
-import type { SpeciesRecord } from '../../library/types.ts'
 import type { Solute } from './solutes.ts'
 
 /** mol per kg of water by component, drugs' own ions by their id. */
@@ -12,35 +11,19 @@ export interface SoluteTotals {
 }
 
 /** Sums what the solutes release. */
-export function soluteTotals(
-  solutes: readonly Solute[],
-  species: ReadonlyMap<string, SpeciesRecord>,
-): SoluteTotals {
+export function soluteTotals(solutes: readonly Solute[]): SoluteTotals {
   const all: Record<string, number> = {}
   const outsidePool: Record<string, number> = {}
   let charge = 0
   let size = 0
-  const add = (component: string, amount: number, solute: Solute) => {
-    all[component] = (all[component] ?? 0) + amount
-    if (solute.kind !== 'pool') outsidePool[component] = (outsidePool[component] ?? 0) + amount
-  }
-  for (const solute of solutes) {
-    if (!solute.ingredient.molarMass) continue
-    for (const { species: id, count, charge: z } of solute.ingredient.releases ?? []) {
-      const amount = solute.molality * count
-      charge += z * amount
-      size += Math.abs(z) * amount
-      const record = species.get(id)
-      if (!record) {
-        if (isIonic(id, z, solute)) add(id, amount, solute)
-      } else if (record.component !== 'proton') {
-        add(record.component, record.count * amount, solute)
-        for (const partner of record.partners ?? []) add(partner.component, partner.count * amount, solute)
-      }
+  for (const { molality, kind, facts } of solutes) {
+    charge += facts.charge * molality
+    size += facts.chargeSize * molality
+    for (const { component, count } of facts.given) {
+      const amount = molality * count
+      all[component] = (all[component] ?? 0) + amount
+      if (kind !== 'pool') outsidePool[component] = (outsidePool[component] ?? 0) + amount
     }
   }
   return { all, outsidePool, charge: Math.abs(charge) <= size * 1e-6 ? 0 : charge }
 }
-
-const isIonic = (id: string, charge: number, { ingredient }: Solute) =>
-  charge !== 0 || (ingredient.ionisingSpecies === id && (ingredient.ownIonisation?.length ?? 0) > 0)

@@ -140,6 +140,17 @@ function respond(
   return { response: { lnHydrogen, molalities: direction }, dLnGamma }
 }
 
+/* Scratch, apart from that of the solves; everything read from it is written before. */
+const workspaces = new WeakMap<Network, Workspace>()
+
+function workspaceOf(network: Network): Workspace {
+  const known = workspaces.get(network)
+  if (known) return known
+  const made = new Workspace(network.layout)
+  workspaces.set(network, made)
+  return made
+}
+
 /**
  * Buffer capacity of an answer: mol/kg of strong base per unit of pH, from the derivative of the mass and
  * charge balances at the actual composition: every acid step, complex, polymer and water counts.
@@ -153,7 +164,7 @@ export function bufferCapacity(
 ): BufferCapacity {
   const { network } = compiled
   const { layout } = network
-  const work = new Workspace(layout)
+  const work = workspaceOf(network)
   for (const [index, component] of layout.components.entries()) work.totals[index] = totals[component] ?? 0
   placeTotals(layout, work)
   work.lnGamma.set(answer.lnGamma)

@@ -1,6 +1,7 @@
 import { Workspace } from './balance.ts'
 import { compileNetwork } from './compile.ts'
 import type { Network } from './compile.ts'
+import { RecentAnswers } from './recent.ts'
 import { solveNetwork } from './solve.ts'
 import type {
   ProtonCondition,
@@ -34,6 +35,7 @@ export function compileSpeciation(
   const work = new Workspace(network.layout)
   const { components, species } = network.layout
   const indexOf = new Map(components.map((component, index) => [component, index]))
+  const recent = new RecentAnswers()
   return {
     status: 'compiled',
     network,
@@ -48,7 +50,7 @@ export function compileSpeciation(
           return { status: 'impossible', code: 'species-unknown', values: { species: component } }
         }
       }
-      return solveNetwork(network, work, condition)
+      return recent.answer(work.totals, condition, () => solveNetwork(network, work, condition))
     },
   }
 }

@@ -13,6 +13,8 @@ export interface Plan {
   readonly setting: Setting
   readonly solutes: readonly ReadLine[]
   readonly adjusters: readonly ReadLine[]
+  /** The vehicle that fills up to the final volume, by what it holds; empty: water. */
+  readonly fills: readonly ReadLine[]
   readonly balance: Balance
   readonly target: Target | null
 }

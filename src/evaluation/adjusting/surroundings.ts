@@ -18,6 +18,7 @@ export function surroundingsOf(plan: Plan): Surroundings | Finding {
   const { volumeMl } = plan.setting
   let around: Surroundings = { volumeMl, waterKg: volumeMl / 1000, densityGPerMl: 1 }
   if (!plan.solutes.some(needsSurroundings)) return around
+  if (plan.fills.length > 0) return unsettled(plan)
   for (let round = 0; round < mostRounds; round++) {
     const portions = portionsIn(around, plan)
     if ('code' in portions) return portions
@@ -45,7 +46,7 @@ const unsettled = (plan: Plan) => {
 }
 
 /* Rounding would keep the repetition from settling; it follows when the surroundings are known. */
-const unrounded: Balance = { readabilityG: null, leastWeighableG: 0, batchFactor: 1 }
+const unrounded: Balance = { scales: [], measures: [], batchFactor: 1, batchVolumeMl: 0 }
 
 function portionsIn(around: Surroundings, plan: Plan): Portion[] | Finding {
   const portions: Portion[] = []

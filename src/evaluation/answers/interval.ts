@@ -25,6 +25,8 @@ export interface Weighed {
   readonly name: string
   readonly grams: number
   readonly osmolalityMilliosmPerKg: number
+  /** Standard uncertainty of this mass, relative, where it is not one of the step of a balance. */
+  readonly relative?: number
 }
 
 /**
@@ -40,13 +42,15 @@ export function preparationParts(
   const total = lines.reduce((sum, line) => sum + line.osmolalityMilliosmPerKg, 0)
   const step = readabilityG === null ? 0 : readabilityG / Math.sqrt(12) / batchFactor
   const weighing = lines
-    .filter(({ grams }) => step > 0 && grams > 0)
-    .map(({ key, name, grams, osmolalityMilliosmPerKg }) => ({
+    .filter(({ grams }) => grams > 0)
+    .map((line) => ({ ...line, relative: line.relative ?? step / line.grams }))
+    .filter(({ relative }) => relative > 0)
+    .map(({ key, name, relative, osmolalityMilliosmPerKg }) => ({
       kind: 'amount' as const,
-      relative: step / grams,
+      relative,
       key,
       input: `weighing of ${name}`,
-      osmolalityMilliosmPerKg: (osmolalityMilliosmPerKg * step) / grams,
+      osmolalityMilliosmPerKg: osmolalityMilliosmPerKg * relative,
     }))
   const filling = {
     kind: 'every-amount' as const,

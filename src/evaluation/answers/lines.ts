@@ -27,6 +27,9 @@ export function bareLine(line: ReadLine, lowered: Lowered | undefined): LineAnsw
     osmolalityShareMilliosmPerKg: null,
     effectiveOsmolalityShareMilliosmPerKg: null,
     belowLeastWeighable: lowered?.belowLeastWeighable ?? false,
+    ...(line.stock ? { stock: line.stock } : {}),
+    ...(line.ordered ? { ordered: line.ordered } : {}),
+    ...(line.certified ? { certified: line.certified } : {}),
   }
 }
 

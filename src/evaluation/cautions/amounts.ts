@@ -10,7 +10,12 @@ export interface PerMillilitre {
   readonly milliequivalents: number | null
 }
 
-type Amount = number | { readonly need: Need }
+/** What is not known and would have to be. */
+export interface Missing {
+  readonly needs: readonly Need[]
+}
+
+type Amount = number | Missing
 
 interface Scale {
   readonly of: keyof PerMillilitre
@@ -20,9 +25,9 @@ interface Scale {
   readonly times?: (patient: CautionPatient) => Amount
 }
 
-const doseVolume = ({ doseVolumeMl }: CautionPatient): Amount => doseVolumeMl ?? { need: 'dose volume' }
+const doseVolume = ({ doseVolumeMl }: CautionPatient): Amount => doseVolumeMl ?? { needs: ['dose volume'] }
 const hourly = ({ infusionRateMlPerH }: CautionPatient): Amount =>
-  infusionRateMlPerH ?? { need: 'infusion rate' }
+  infusionRateMlPerH ?? { needs: ['infusion rate'] }
 
 /** mL in a day: a running infusion goes on for 24 h; where only a dose is known it is given at least once. */
 function daily(patient: CautionPatient): Amount {
@@ -35,8 +40,10 @@ const perKilogram =
   (volume: (patient: CautionPatient) => Amount) =>
   (patient: CautionPatient): Amount => {
     const millilitres = volume(patient)
-    if (typeof millilitres !== 'number') return millilitres
-    return patient.weightKg === undefined ? { need: 'weight' } : millilitres / patient.weightKg
+    const { weightKg } = patient
+    if (typeof millilitres === 'number' && weightKg !== undefined) return millilitres / weightKg
+    const ofVolume = typeof millilitres === 'number' ? [] : millilitres.needs
+    return { needs: weightKg === undefined ? ['weight', ...ofVolume] : ofVolume }
   }
 
 const scales: Readonly<Record<AmountUnit, Scale>> = {
@@ -63,10 +70,10 @@ export function amountIn(
   unit: AmountUnit,
   perMillilitre: PerMillilitre,
   { patient }: CautionContext,
-): number | { need: Need } {
+): Amount {
   const { of, factor, times = () => 1 } = scales[unit]
   const content = perMillilitre[of]
-  if (content === null) return { need: 'strength' }
+  if (content === null) return { needs: ['strength'] }
   const multiple = times(patient)
   return typeof multiple === 'number' ? asShown(content * factor * multiple, { significant: 4 }) : multiple
 }

@@ -18,7 +18,7 @@ import { named } from './words.ts'
 
 /** What a trigger tree comes to in a context: pure, and `unknown` where it hangs on what is not known. */
 export function judge(condition: Condition, context: CautionContext): Outcome {
-  if ('all' in condition) return allOf(condition.all.map((part) => judge(part, context)))
+  if ('all' in condition) return everyPart(condition.all, context)
   if ('any' in condition) return anyOf(condition.any.map((part) => judge(part, context)))
   if ('not' in condition) return notOf(judge(condition.not, context))
   if ('unless' in condition) return unlessOf(judge(condition.unless, context))
@@ -38,6 +38,17 @@ export function judge(condition: Condition, context: CautionContext): Outcome {
 }
 
 type Case<Key extends string> = Extract<Condition, { readonly [key in Key]: unknown }>
+
+/** One part that fails decides: what stands behind it, and may be costly, is not asked. */
+function everyPart(parts: readonly Condition[], context: CautionContext): Outcome {
+  const outcomes: Outcome[] = []
+  for (const part of parts) {
+    const result = judge(part, context)
+    if (result.truth === false) return outcome(false)
+    outcomes.push(result)
+  }
+  return allOf(outcomes)
+}
 
 /** Nothing but these, and at least one. */
 function everyLine({ everyLine: selector }: Case<'everyLine'>, { lines }: CautionContext): Outcome {

@@ -1,3 +1,4 @@
+import type { Interval } from '../../quantity/interval.ts'
 import type { RouteLimits } from '../../library/routes.ts'
 import type { Ingredient } from '../../library/types.ts'
 import type { UsualStrength } from '../../library/usual-strengths.ts'
@@ -31,14 +32,17 @@ export interface CautionSolution {
   readonly osmolality: number
   /** mOsm/kg held outside of red cells */
   readonly effectiveOsmolality: number
+  /** Both with the interval within which a reading may lie. */
+  readonly intervals: { readonly osmolality: Interval; readonly effectiveOsmolality: Interval }
+  readonly freezingPointDepressionK: number
   /** mOsm/L, from the solved solution. */
   readonly osmolarity: number | null
   /** mOsm/L, the ideal sum that labels print. */
   readonly labelOsmolarity: number | null
   readonly sodiumChlorideEquivalentPercent: number | null
   readonly pH: number | null
-  /** mol/L per pH; null where it was not solved. */
-  readonly bufferCapacity: number | null
+  /** mol/L per pH, solved when a rule asks for it; null where it cannot be. */
+  readonly bufferCapacity: () => number | null
 }
 
 /** Everything that the caution rules may look at. */

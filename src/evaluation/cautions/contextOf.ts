@@ -1,13 +1,14 @@
 import type { Library } from '../../library/library.ts'
 import { loadUsualStrengths } from '../../library/usual-strengths.ts'
 import type { Evaluation, LineAnswer, SolutionAnswer } from '../types.ts'
+import { bufferCapacityOf } from './bufferCapacity.ts'
 import type { CautionContext, CautionLine, CautionPatient, CautionSolution } from './context.ts'
 
 /** What an evaluation says, as the caution rules want it. */
 export function cautionContextOf(
-  evaluation: Pick<Evaluation, 'formula' | 'volumeMl' | 'lines' | 'solution'>,
+  evaluation: Evaluation,
   patient: CautionPatient,
-  library: Pick<Library, 'species' | 'routes'>,
+  library: Library,
 ): CautionContext {
   const { formula, volumeMl, solution } = evaluation
   const limits = library.routes.get(formula.route)
@@ -19,7 +20,7 @@ export function cautionContextOf(
     limits,
     patient,
     lines,
-    solution: solution && solutionOf(solution),
+    solution: solution && solutionOf(solution, () => bufferCapacityOf(evaluation, library)),
     ionTotals: ionTotalsOf(lines, library),
     volumeMl,
     usualStrengths: loadUsualStrengths(),
@@ -52,14 +53,16 @@ export function cautionLine(
 
 type LineAnswerPart = Pick<LineAnswer, 'key' | 'ingredient' | 'grams' | 'millimoles' | 'isAdjuster'>
 
-const solutionOf = (solution: SolutionAnswer): CautionSolution => ({
+const solutionOf = (solution: SolutionAnswer, capacity: () => number | null): CautionSolution => ({
   osmolality: solution.osmolality.value,
   effectiveOsmolality: solution.effectiveOsmolality.value,
+  intervals: { osmolality: solution.osmolality, effectiveOsmolality: solution.effectiveOsmolality },
+  freezingPointDepressionK: solution.freezingPointDepressionK,
   osmolarity: solution.osmolarityMilliosmPerL,
   labelOsmolarity: solution.labelOsmolarityMilliosmPerL,
   sodiumChlorideEquivalentPercent: solution.sodiumChlorideEquivalentPercent,
   pH: solution.pH,
-  bufferCapacity: null,
+  bufferCapacity: capacity,
 })
 
 /** mmol/L of each ion or component as put in; null where a line that gives it has no known strength. */

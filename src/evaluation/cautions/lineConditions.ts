@@ -6,7 +6,7 @@ import { crossed, crosses } from './limits.ts'
 import { readMetric } from './metrics.ts'
 import { outcome, unknown, type Need, type Outcome } from './outcome.ts'
 import { selected } from './selectors.ts'
-import { named } from './words.ts'
+import { amountText, named } from './words.ts'
 import { asShown } from './shown.ts'
 
 type Case<Key extends string> = Extract<Condition, { readonly [key in Key]: unknown }>
@@ -49,7 +49,7 @@ export function lineStrength(
   const over: { readonly lines: readonly CautionLine[]; readonly strength: number }[] = []
   for (const lines of groups) {
     const strength = amountIn(limit.unit, added(lines), context)
-    if (typeof strength !== 'number') needs.push(strength.need)
+    if (typeof strength !== 'number') needs.push(...strength.needs)
     else if (crosses(strength, limit)) over.push({ lines, strength })
   }
   const [worst] = over.toSorted((a, b) =>
@@ -84,7 +84,7 @@ export function ionAmount({ ion, amount }: Case<'ion'>, context: CautionContext)
     },
     context,
   )
-  if (typeof value !== 'number') return total === 0 ? outcome(false) : unknown([value.need])
+  if (typeof value !== 'number') return total === 0 ? outcome(false) : unknown(value.needs)
   if (!crosses(value, amount)) return outcome(false)
   return outcome(true, { amount: value, amountLimit: crossed(value, amount) })
 }
@@ -130,7 +130,7 @@ function byText(selector: Selector, context: CautionContext, test: (text: string
   if (found.length === 0) return outcome(false)
   return outcome(
     true,
-    { ingredient: named(found), text: found.map(({ key }) => texts.get(key)).join(', ') },
+    { ingredient: named(found), text: found.map(({ key }) => amountText(texts.get(key) ?? '')).join(', ') },
     found,
   )
 }

@@ -47,9 +47,14 @@ const readings: Readonly<Record<Metric, Reading>> = {
     shown: { decimals: 3 },
     need: 'sodium chloride equivalent',
   },
-  pH: { of: ({ solution }) => solution?.pH, shown: { decimals: 2 }, need: 'pH' },
+  /* A pH that was ordered holds while the formula is blocked. */
+  pH: {
+    of: ({ solution, formula }) => (solution ? solution.pH : formula.pH),
+    shown: { decimals: 2 },
+    need: 'pH',
+  },
   'buffer-capacity': {
-    of: ({ solution }) => solution?.bufferCapacity,
+    of: ({ solution }) => solution?.bufferCapacity(),
     shown: { significant: 2 },
     need: 'buffer capacity',
   },

@@ -2,6 +2,8 @@ import { type Caution, loadCautions } from '../../library/cautions.ts'
 import type { Finding } from '../types.ts'
 import { judge } from './condition.ts'
 import type { CautionContext } from './context.ts'
+import { dailyLoads } from './loads.ts'
+import { missedTarget } from './missedTarget.ts'
 import type { Outcome } from './outcome.ts'
 import { unansweredChecks } from './unanswered.ts'
 
@@ -29,6 +31,8 @@ export function raiseCautions(
     ...spoken
       .toSorted((a, b) => rank[a.caution.severity] - rank[b.caution.severity])
       .map(({ caution, outcome }) => findingOf(caution, outcome)),
+    ...missedTarget(context),
+    ...dailyLoads(context),
     ...unansweredChecks(judged, context),
   ]
 }

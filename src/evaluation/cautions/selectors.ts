@@ -8,8 +8,30 @@ const shares = (wanted: readonly string[] | undefined, has: readonly string[]) =
 const isCalled = ({ name, synonyms }: Ingredient, words: readonly string[]) =>
   [name, ...synonyms].some((text) => words.some((word) => text.toLowerCase().includes(word)))
 
+/* It follows from the two alone, and is asked for every caution and line at every keystroke. */
+const known = new WeakMap<Selector, WeakMap<Ingredient, boolean>>()
+
+function answersOf(selector: Selector): WeakMap<Ingredient, boolean> {
+  const earlier = known.get(selector)
+  if (earlier) return earlier
+  const made = new WeakMap<Ingredient, boolean>()
+  known.set(selector, made)
+  return made
+}
+
+function isMeant(ingredient: Ingredient, selector: Selector, answers: WeakMap<Ingredient, boolean>): boolean {
+  const earlier = answers.get(ingredient)
+  if (earlier !== undefined) return earlier
+  const answer = reckoned(ingredient, selector)
+  answers.set(ingredient, answer)
+  return answer
+}
+
 /** Whether an ingredient is one of those that are meant. */
-export function isSelected(ingredient: Ingredient, selector: Selector): boolean {
+export const isSelected = (ingredient: Ingredient, selector: Selector): boolean =>
+  isMeant(ingredient, selector, answersOf(selector))
+
+function reckoned(ingredient: Ingredient, selector: Selector): boolean {
   const { ids, tags, roles, releases, names, everything, hasOtherForms, except } = selector
   const named =
     everything === true ||
@@ -26,5 +48,7 @@ export function isSelected(ingredient: Ingredient, selector: Selector): boolean 
 }
 
 /** The lines that are meant. */
-export const selected = (lines: readonly CautionLine[], selector: Selector): readonly CautionLine[] =>
-  lines.filter(({ ingredient }) => isSelected(ingredient, selector))
+export function selected(lines: readonly CautionLine[], selector: Selector): readonly CautionLine[] {
+  const answers = answersOf(selector)
+  return lines.filter(({ ingredient }) => isMeant(ingredient, selector, answers))
+}

@@ -37,7 +37,7 @@ export function againstUsual(
  * tells: what is made of a vial is not ten times the vial.
  */
 function departureOf(line: CautionLine, usual: Usual, context: CautionContext): string | null {
-  const ranges = context.usualStrengths.filter(({ ingredient }) => ingredient === line.ingredient.id)
+  const ranges = rangesOf(context.usualStrengths, line.ingredient.id)
   const here = ranges.filter(({ routes }) => !routes || routes.includes(context.routeId))
   const { timesAbove, timesBelow, outside } = usual
   const isFarAbove = ({ unit, to }: UsualStrength) =>
@@ -52,6 +52,19 @@ function departureOf(line: CautionLine, usual: Usual, context: CautionContext): 
   if (upper.length > 0 && upper.every(isFarAbove)) return told(line, upper, context)
   if (here.length > 0 && here.every(isFarBelow)) return told(line, here, context)
   return null
+}
+
+/* By ingredient, once for each table. */
+const tables = new WeakMap<readonly UsualStrength[], Map<string, readonly UsualStrength[]>>()
+
+function rangesOf(all: readonly UsualStrength[], id: string): readonly UsualStrength[] {
+  let table = tables.get(all)
+  if (!table) {
+    table = new Map()
+    for (const range of all) table.set(range.ingredient, [...(table.get(range.ingredient) ?? []), range])
+    tables.set(all, table)
+  }
+  return table.get(id) ?? []
 }
 
 function isBeyond(

@@ -1,4 +1,6 @@
 import { expressNumber } from '../../quantity/express.ts'
+import { readAmount } from '../../quantity/readAmount.ts'
+import { printAmount } from '../../quantity/writeAmount.ts'
 import type { Band } from '../../library/routes.ts'
 import type { CautionLine } from './context.ts'
 
@@ -14,4 +16,14 @@ export function bandText({ low, high }: Band, unit: string): string {
   const figure = (value: number) => (unit === 'pH' ? expressNumber(value) : `${expressNumber(value)} ${unit}`)
   if (low === undefined) return high === undefined ? 'any' : `at most ${figure(high)}`
   return high === undefined ? `at least ${figure(low)}` : `${expressNumber(low)} to ${figure(high)}`
+}
+
+/**
+ * An amount in the notation that a person chose, in safe expression; what cannot be read stays as it was typed.
+ * @example amountText('5.0µg') → '5 mcg'
+ */
+export function amountText(typed: string): string {
+  const read = readAmount(typed)
+  if (!read.ok) return typed
+  return printAmount(read.value)
 }

@@ -1,10 +1,15 @@
 import { readAmount } from '../../quantity/readAmount.ts'
 import { resolveAmount } from '../../quantity/resolveAmount.ts'
 import { findIngredients } from '../../library/find.ts'
+import { formFactor, type FormFactor } from '../../library/forms.ts'
 import type { Library } from '../../library/library.ts'
+import type { Stock } from '../../library/stocks.ts'
 import type { Ingredient } from '../../library/types.ts'
 import type { Formula, FormulaLine } from '../../formula/types.ts'
 import { findingOf } from '../finding.ts'
+import { certify } from '../forms/certificate.ts'
+import { readStock } from '../stocks/readStock.ts'
+import { stockOf } from '../stocks/stock.ts'
 import { factsOf } from './facts.ts'
 import type { Finding } from '../types.ts'
 import type { ReadLine } from '../lowering.ts'
@@ -19,7 +24,9 @@ export function readLines(
   const findings: Finding[] = []
   for (const line of formula.lines) {
     const ingredient = ingredientOf(line, library)
-    if (!ingredient) findings.push(unknownIngredient(line, library))
+    const stock = typeof line.ingredient === 'string' ? stockOf(line.ingredient, formula, library) : undefined
+    if (!ingredient && stock) readStockLine(line, stock, library, lines, findings)
+    else if (!ingredient) findings.push(unknownIngredient(line, library))
     else readLine(line, ingredient, library, volumeMl, lines, findings)
   }
   findings.push(...repeated(lines, library))
@@ -38,6 +45,31 @@ function unknownIngredient(line: FormulaLine, library: Library): Finding {
     lineKeys: [line.key],
     blocks: true,
   })
+}
+
+function readStockLine(
+  line: FormulaLine,
+  stock: Stock,
+  library: Library,
+  lines: ReadLine[],
+  findings: Finding[],
+): void {
+  const amount = readAmount(line.amount)
+  if (!amount.ok) {
+    const { message, wayOut } = amount.refusal
+    findings.push(
+      findingOf(library, 'amount-unreadable', {
+        values: { ingredient: stock.name, text: line.amount, reason: message, instead: wayOut },
+        ingredients: [stock.id],
+        lineKeys: [line.key],
+        blocks: true,
+      }),
+    )
+    return
+  }
+  const read = readStock(line, amount.value, stock, library)
+  lines.push(...read.lines)
+  findings.push(...read.findings)
 }
 
 function readLine(
@@ -69,7 +101,40 @@ function readLine(
     )
   }
   const part = isVehicle ? 'vehicle' : isAdjuster ? 'adjuster' : 'solute'
-  lines.push({ key: line.key, ingredient, amount: amount.value, part, share, capGrams })
+  const form = orderedForm(line, ingredient, library)
+  if (form.finding) findings.push(form.finding)
+  const certificate = line.certificate ? certify(line.key, ingredient, line.certificate, library) : null
+  findings.push(...(certificate?.findings ?? []))
+  lines.push({
+    key: line.key,
+    ingredient,
+    amount: amount.value,
+    part,
+    share,
+    capGrams,
+    ...(form.ordered ? { ordered: form.ordered } : {}),
+    ...(certificate?.certified ? { certified: certificate.certified } : {}),
+  })
+}
+
+/** What the amount means where it is not the article; a meaning that does not fit the article blocks. */
+function orderedForm(
+  { key, orderedAs, amount }: FormulaLine,
+  ingredient: Ingredient,
+  library: Library,
+): { readonly ordered: FormFactor | null; readonly finding: Finding | null } {
+  if (orderedAs === undefined || orderedAs === ingredient.id) return { ordered: null, finding: null }
+  const ordered = formFactor(ingredient, orderedAs, library.ingredients, library.moieties)
+  if (ordered) return { ordered, finding: null }
+  return {
+    ordered: null,
+    finding: findingOf(library, 'ordered-form-unknown', {
+      values: { ingredient: ingredient.name, form: orderedAs, text: amount },
+      ingredients: [ingredient.id],
+      lineKeys: [key],
+      blocks: true,
+    }),
+  }
 }
 
 /** The water around everything: it takes no share in the osmolality and "q.s." means up to volume. */
@@ -105,7 +170,10 @@ function readCap(
 /** The same ingredient on several lines is allowed and worth a remark. */
 function repeated(lines: readonly ReadLine[], library: Library): Finding[] {
   const keys = new Map<string, string[]>()
-  for (const { ingredient, key } of lines) keys.set(ingredient.id, [...(keys.get(ingredient.id) ?? []), key])
+  for (const { ingredient, key, stock } of lines) {
+    if (stock) continue
+    keys.set(ingredient.id, [...(keys.get(ingredient.id) ?? []), key])
+  }
   return [...keys].flatMap(([id, lineKeys]) =>
     lineKeys.length < 2
       ? []

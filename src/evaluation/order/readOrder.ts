@@ -5,14 +5,18 @@ import type { Formula } from '../../formula/types.ts'
 import { targetUnits, type Target } from '../adjusting/target.ts'
 import { findingOf } from '../finding.ts'
 import type { Finding } from '../types.ts'
+import { batchFactorOf, batchPartsOf } from '../weighing/batchParts.ts'
+import { readBench } from '../weighing/bench.ts'
+import type { Measure } from '../weighing/measures.ts'
+import type { Scale } from '../weighing/scales.ts'
 
 /** The formula's frame, read; null where it could not be. */
 export interface Order {
   readonly volumeMl: number | null
   readonly temperatureCelsius: number
   readonly target: Target | null
-  /** Readability of the balance, g. */
-  readonly readabilityG: number | null
+  readonly scales: readonly Scale[]
+  readonly measures: readonly Measure[]
   /** Batch volume over evaluated volume. */
   readonly batchFactor: number
 }
@@ -42,13 +46,12 @@ export function readOrder(formula: Formula, library: Library): { order: Order; f
       : read('target-unreadable', target.value, readTarget(target.quantity, target.value))
   const readabilityG =
     balance === undefined ? null : read('balance-unreadable', balance, readReadability(balance))
-  const excessMl =
-    batch?.excess === undefined ? 0 : read('excess-unreadable', batch.excess, readVolume(batch.excess))
-  const units = batch?.units ?? 1
-  if (!(Number.isFinite(units) && units > 0)) {
-    findings.push(findingOf(library, 'batch-unusable', { values: { text: String(units) }, blocks: true }))
-  }
-  const unreadable = findings.length > 0
+  const bench = readBench(formula, readabilityG, library)
+  findings.push(...bench.findings)
+  const batchRead = volumeMl === null ? null : batchPartsOf(batch, volumeMl, library)
+  findings.push(...(batchRead?.findings ?? []))
+  const unreadable = findings.some(({ blocks }) => blocks)
+  const parts = batchRead?.parts
   return {
     findings,
     order: {
@@ -58,8 +61,9 @@ export function readOrder(formula: Formula, library: Library): { order: Order; f
         target && wanted !== null
           ? { quantity: target.quantity, value: wanted, unit: targetUnits[target.quantity] }
           : null,
-      readabilityG,
-      batchFactor: unreadable || volumeMl === null ? 1 : units + (excessMl ?? 0) / volumeMl,
+      scales: bench.scales,
+      measures: bench.measures,
+      batchFactor: unreadable || !parts ? 1 : batchFactorOf(parts),
     },
   }
 }

@@ -4,6 +4,7 @@ import { isBeyondOsmometer } from '../model.ts'
 import type { Finding } from '../types.ts'
 import { equivalentRemarks, missingRemarks, spreadRemarks } from './methodRemarks.ts'
 import type { RemarkContext } from './remarkContext.ts'
+import { freeFormRemarks, saturationRemarks } from './saturation.ts'
 import { namesOf, reflectionRemarks, tonicityRemarks } from './tonicity.ts'
 import { weighingRemarks } from './weighing.ts'
 
@@ -27,6 +28,8 @@ export function remarksOn({ plan, standing }: Question, answered: Answered): Fin
     ...missingRemarks(context),
     ...equivalentRemarks(context),
     ...scaleRemarks(context),
+    ...saturationRemarks(context),
+    ...freeFormRemarks(context),
   ]
 }
 

@@ -111,10 +111,13 @@ describe('lines', () => {
     const deeds = [
       () => actions.addLine('glycerin'),
       () =>
-        actions.addPasted([
-          { name: 'Boric acid', amount: '1 %' },
-          { name: 'nothing known', amount: '' },
-        ]),
+        actions.addPasted({
+          lines: [
+            { name: 'Boric acid', amount: '1 %' },
+            { name: 'nothing known', amount: '' },
+          ],
+          leftOut: [],
+        }),
       () => actions.moveLine('k0', 1),
       () => actions.removeLine('k1'),
       () => actions.setIngredient('k2', 'mannitol'),
@@ -136,10 +139,16 @@ describe('lines', () => {
 
   it('take a name that is known exactly, and keep any other as it was written', () => {
     const { store, actions } = pageWith()
-    actions.addPasted([
-      { name: 'SODIUM CHLORIDE', amount: 'q.s.' },
-      { name: 'sodium chlorid', amount: '1 %' },
-    ])
+    actions.addPasted({
+      lines: [
+        { name: 'SODIUM CHLORIDE', amount: 'q.s.' },
+        { name: 'sodium chlorid', amount: '1 %' },
+      ],
+      leftOut: ['the column “Lot”'],
+    })
+    expect(store.getState().notice).toBe(
+      'Pasted: 2 lines. 1 is in doubt, kept as it stood and marked. Left out: the column “Lot”.',
+    )
     expect(store.getState().formula.lines.map((line) => line.ingredient)).toEqual([
       'sodium-chloride',
       'sodium chlorid',
@@ -155,7 +164,10 @@ describe('lines', () => {
 
   it('are never more than a document holds, and what did not fit is said', () => {
     const { store, actions } = pageWith()
-    actions.addPasted(Array.from({ length: 600 }, () => ({ name: 'urea', amount: '1 g' })))
+    actions.addPasted({
+      lines: Array.from({ length: 600 }, () => ({ name: 'urea', amount: '1 g' })),
+      leftOut: [],
+    })
     expect(store.getState().formula.lines).toHaveLength(500)
     expect(store.getState().notice).toContain('500')
   })

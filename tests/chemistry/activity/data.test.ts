@@ -36,7 +36,7 @@ describe('interaction parameters', () => {
     for (const { ions } of [...neutral.lambda, ...neutral.zeta]) expect(chargeOf(ions[0] ?? '')).toBe(0)
   })
 
-  it('of sea salt are all of one set', () => {
+  it('of sea salt are all of one set, but for potassium sulfate, whose form over temperature is its own set', () => {
     const sea = new Set(['Na+', 'K+', 'Mg+2', 'Ca+2', 'H+', 'Cl-', 'SO4-2', 'HSO4-', 'OH-', 'HCO3-', 'CO3-2'])
     const others = [...mixing.theta, ...mixing.psi]
       .filter(({ ions }) => ions.every((ion) => sea.has(ion)))
@@ -44,9 +44,14 @@ describe('interaction parameters', () => {
     expect(others).toEqual([])
     for (const cation of ['Na+', 'K+', 'Mg+2', 'Ca+2']) {
       for (const anion of ['Cl-', 'SO4-2']) {
-        expect(library.electrolytes.binary.get(`${cation}|${anion}`)?.source).toBe('HarvieMollerWeare1984')
+        const source = cation === 'K+' && anion === 'SO4-2' ? 'HolmesMesmer1986' : 'HarvieMollerWeare1984'
+        expect(library.electrolytes.binary.get(`${cation}|${anion}`)?.source).toBe(source)
       }
     }
+  })
+
+  it('of potassium sulfate are those of the set that is named: β1 0.6179, not 0.7793', () => {
+    expect(library.electrolytes.binary.get('K+|SO4-2')?.beta1.at25).toBe(0.6179)
   })
 
   it('of sodium chloride do not repeat the misprint', () => {

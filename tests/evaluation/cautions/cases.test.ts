@@ -2,26 +2,9 @@ import { describe, expect, it } from 'vitest'
 import { judge } from '../../../src/evaluation/cautions/condition.ts'
 import { raiseCautions } from '../../../src/evaluation/cautions/raise.ts'
 import { tellFinding } from '../../../src/worksheet/tell.ts'
+import { cases } from './cases/all.ts'
 import { meetings } from './cases/meetings.ts'
-import { drugCases, ionCases, preservativeCases } from './cases/incompatibility.ts'
-import { electrolyteCases } from './cases/electrolytes.ts'
-import { handlingCases, nameCases } from './cases/handling.ts'
-import { populationCases } from './cases/populations.ts'
-import { osmolalityCases, pHCases, routeCases } from './cases/routes.ts'
-import { contextOf, library, silenced, type Case, type Situation } from './contexts.ts'
-
-const cases: readonly Case[] = [
-  ...ionCases,
-  ...drugCases,
-  ...preservativeCases,
-  ...routeCases,
-  ...osmolalityCases,
-  ...pHCases,
-  ...electrolyteCases,
-  ...populationCases,
-  ...handlingCases,
-  ...nameCases,
-]
+import { contextOf, library, silenced, type Situation } from './contexts.ts'
 
 const cautionOf = (id: string) => {
   const caution = library.cautions.find((candidate) => candidate.id === id)

@@ -10,6 +10,7 @@ import type { RouteId } from '../../../src/formula/types.ts'
 import { loadLibrary } from '../../../src/library/library.ts'
 import type { Ingredient } from '../../../src/library/types.ts'
 import { loadUsualStrengths } from '../../../src/library/usual-strengths.ts'
+import { intervalAround } from '../../../src/quantity/interval.ts'
 import { readAmount } from '../../../src/quantity/readAmount.ts'
 import { resolveAmount } from '../../../src/quantity/resolveAmount.ts'
 
@@ -30,7 +31,7 @@ export interface Situation {
   readonly patient?: CautionPatient
 }
 
-const ownRecord = (name: string): Ingredient => ({
+export const ownRecord = (name: string): Ingredient => ({
   id: name.toLowerCase().replaceAll(' ', '-'),
   name,
   synonyms: [],
@@ -57,14 +58,20 @@ function lineOf(key: string, id: string, text: string, volumeMl: number): Cautio
 
 const solutionOf = (situation: Situation): CautionSolution => {
   const osmolality = situation.osmolality ?? 290
+  const effectiveOsmolality = situation.effective ?? osmolality
   return {
     osmolality,
-    effectiveOsmolality: situation.effective ?? osmolality,
+    effectiveOsmolality,
+    intervals: {
+      osmolality: intervalAround(osmolality, 3),
+      effectiveOsmolality: intervalAround(effectiveOsmolality, 3),
+    },
+    freezingPointDepressionK: 0.00186 * osmolality,
     osmolarity: situation.osmolarity ?? osmolality,
     labelOsmolarity: null,
     sodiumChlorideEquivalentPercent: situation.equivalent ?? 0.9,
     pH: situation.pH === undefined ? 7.2 : situation.pH,
-    bufferCapacity: situation.capacity ?? null,
+    bufferCapacity: () => situation.capacity ?? null,
   }
 }
 

@@ -1,9 +1,10 @@
 import { assert, double, property } from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { designAliquot, leastWeighable } from '../../../src/evaluation/weighing/aliquot.ts'
+import { measureOf } from '../../../src/evaluation/weighing/measures.ts'
 import { loadDevices } from '../../../src/library/devices.ts'
 
-const devices = loadDevices()
+const devices = loadDevices().map(measureOf)
 const need = { neededGrams: 0.004, leastWeighableGrams: 0.12, weighingErrorGrams: 0.006, roomMl: 50 }
 
 describe('least weighable quantity', () => {

@@ -1,6 +1,7 @@
 import { loadLibrary } from '../../../src/library/library.ts'
 import type { BinaryRow, Coefficient, ElectrolyteParameters } from '../../../src/library/electrolytes.ts'
 import content from './parameters.json'
+import weak from './weak.json'
 
 const library = loadLibrary()
 
@@ -19,8 +20,8 @@ function keyOf(ions: readonly string[]): string {
   return (positive.length > 1 ? [...positive, ...negative] : [...negative, ...positive]).join('|')
 }
 
-const binary = content.binary.map(
-  ({ cation, anion, alpha1, alpha2, beta0, beta1, beta2, cphi }): readonly [string, BinaryRow] => [
+const pairs = (rows: typeof content.binary) =>
+  rows.map(({ cation, anion, alpha1, alpha2, beta0, beta1, beta2, cphi }): readonly [string, BinaryRow] => [
     `${cation}|${anion}`,
     {
       cation,
@@ -35,8 +36,7 @@ const binary = content.binary.map(
       relativeUncertainty: 0,
       source: 'the engine’s own',
     },
-  ],
-)
+  ])
 
 const mixing = (rows: readonly { readonly ions: readonly string[]; readonly value: readonly number[] }[]) =>
   new Map(rows.map(({ ions, value }) => [keyOf(ions), coefficient(value)]))
@@ -45,7 +45,7 @@ const mixing = (rows: readonly { readonly ions: readonly string[]; readonly valu
 export const engineParameters = (
   more: Iterable<readonly [string, BinaryRow]> = [],
 ): ElectrolyteParameters => ({
-  binary: new Map([...more, ...binary]),
+  binary: new Map([...more, ...pairs(content.binary)]),
   theta: mixing(content.theta),
   psi: mixing(content.psi),
   lambda: new Map(),
@@ -53,3 +53,19 @@ export const engineParameters = (
 })
 
 export const { source } = content
+
+/** The same with the engine's own pairs of carbonate, borate and bisulfate, for solutions that are speciated. */
+export function speciatedEngineParameters(
+  more: Iterable<readonly [string, BinaryRow]> = [],
+): ElectrolyteParameters {
+  const strong = engineParameters(more)
+  const lambda = new Map(weak.lambda.map(({ ions, value }) => [ions.join('|'), coefficient(value)]))
+  for (const { ions, value } of weak.lambda) lambda.set(ions.toReversed().join('|'), coefficient(value))
+  return {
+    binary: new Map([...strong.binary, ...pairs(weak.binary)]),
+    theta: new Map([...strong.theta, ...mixing(weak.theta)]),
+    psi: new Map([...strong.psi, ...mixing(weak.psi)]),
+    lambda,
+    zeta: new Map(weak.zeta.map(({ ions, value }) => [ions.join('|'), coefficient(value)])),
+  }
+}

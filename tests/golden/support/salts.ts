@@ -63,6 +63,11 @@ export const library = loadLibrary()
 export function solute(name: string): Ingredient {
   const parts = released[name]
   if (!parts) throw new Error(`No ions are named for ${name}`)
+  return substance(name, parts)
+}
+
+/** A substance of which one formula unit gives these species, by count. */
+export function substance(name: string, parts: Readonly<Record<string, number>>): Ingredient {
   const releases = Object.entries(parts).map(([species, count]) => {
     const record = library.species.get(species)
     if (!record) throw new Error(`${species} is not among the species`)

@@ -100,6 +100,7 @@ export const handlingCases: readonly Case[] = [
   ],
   ['benzalkonium-from-stock', { lines: bac }, { lines: { cetrimide: '0.005 %' } }],
   ['liquid-by-assay-and-density', { lines: { glycerin: '2 %' } }, { lines: { mannitol: '2 %' } }],
+  ['alcohol-by-volume-or-weight', { lines: { ethanol: '5 %' } }, { lines: { glycerin: '5 %' } }],
   ['sterile-from-unsterile', { lines: saline }, { route: 'nasal' }],
 ]
 

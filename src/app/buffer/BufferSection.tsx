@@ -1,0 +1,26 @@
+import { lazy, Suspense, useState } from 'react'
+import '../common/tables.css'
+import './buffer.css'
+
+const BufferPanel = lazy(() => import('./BufferPanel.tsx'))
+
+/** Acid, base and buffer: closed until it is wanted, since it asks the model many times. */
+export function BufferSection() {
+  const [open, setOpen] = useState(false)
+  return (
+    <section className="section no-print" aria-labelledby="buffer">
+      <details onToggle={(event) => setOpen(event.currentTarget.open)}>
+        <summary>
+          <h2 id="buffer" className="summary-heading">
+            pH and buffer
+          </h2>
+        </summary>
+        {open && (
+          <Suspense fallback={<p className="soft small">Opening…</p>}>
+            <BufferPanel />
+          </Suspense>
+        )}
+      </details>
+    </section>
+  )
+}

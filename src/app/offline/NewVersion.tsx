@@ -1,0 +1,12 @@
+import { usePage } from '../state/context.tsx'
+
+/** Told in passing; nothing waits for an answer, and nothing changes under the hand. */
+export function NewVersion() {
+  const waits = usePage((state) => state.offline.newVersionWaits)
+  return (
+    <p className="small soft no-print" role="status">
+      {waits &&
+        'A new version is ready; it starts when you reload, once no other window of this page is open.'}
+    </p>
+  )
+}

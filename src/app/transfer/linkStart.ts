@@ -1,0 +1,2 @@
+/** How the fragment of an address begins that carries a formula. */
+export const linkStart = '#formula='
