@@ -96,7 +96,8 @@ function digitsOf(value: number): { readonly digits: string; readonly point: num
 
 function roundedDigits(value: number, digits: string, point: number, place: number): number {
   const kept = point - place
-  if (kept >= digits.length) return value
+  // A negative zero is written without its sign.
+  if (kept >= digits.length) return value === 0 ? 0 : value
   if (kept < 0) return 0
   if (kept > safeDigits) return toNumber(roundToStep(rationalOfNumber(value), powerOfTen(place)))
   const count = Number(digits.slice(0, kept)) + (digits.charAt(kept) >= '5' ? 1 : 0)
@@ -110,13 +111,15 @@ function roundedDigits(value: number, digits: string, point: number, place: numb
  * @example roundedDecimal(1234.5, 0) → '1235'
  */
 export function roundedDecimal(value: number, place: number): string {
-  // A double holds fifteen digits as they were rounded; more are kept exact.
-  if (Math.abs(value) < 10 ** (safeDigits + place)) return plainDecimal(roundedToPlace(value, place))
+  // A double holds fifteen digits as they were rounded; more are kept exact, and so is what could overflow.
+  if (Math.abs(value) < Math.min(10 ** (safeDigits + place), largestQuick))
+    return plainDecimal(roundedToPlace(value, place))
   return terminatingDecimal(roundToStep(rationalOfNumber(value), powerOfTen(place))) ?? ''
 }
 
 /** So many digits make a whole number that a double holds. */
 const safeDigits = 15
+const largestQuick = 1e300
 
 export const powerOfTen = (power: number): Rational =>
   power >= 0

@@ -26,7 +26,7 @@ describe('rounding by digits', () => {
   it('is that of the exact fraction, for every number and place', () => {
     fc.assert(
       fc.property(numbers, places, (value, place) => {
-        expect(roundedToPlace(value, place)).toBe(value === 0 ? value : toNumber(exact(value, place)))
+        expect(roundedToPlace(value, place)).toBe(toNumber(exact(value, place)))
         expect(roundedDecimal(value, place)).toBe(terminatingDecimal(exact(value, place)))
       }),
       { numRuns: 4000 },

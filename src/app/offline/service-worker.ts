@@ -34,6 +34,7 @@ async function isAlone(): Promise<boolean> {
 /** Asked by a page that is just loading and has nothing typed yet; other open windows keep what they run on. */
 async function startAlone(asker: ExtendableMessageEvent['source']): Promise<void> {
   if (await isAlone()) await self.skipWaiting()
+  // oxlint-disable-next-line unicorn/require-post-message-target-origin -- a client of a worker has no other origin
   else asker?.postMessage('stays')
 }
 

@@ -151,20 +151,32 @@ function makeSystem(
   celsius: number,
   parts: SystemParts,
 ): ReadySystem | SpeciationFailure {
+  let activity: ActivityModel | undefined
   const compiled = compileSpeciation(
     { celsius, components: contents.components, background: contents.background },
     {
-      species: [...parts.species.values()],
+      species: speciesOf(parts),
       equilibria: parts.equilibria,
-      activity: (species, at) => compileActivityModel(species, parts.electrolytes, at),
+      activity: (species, at) => (activity = compileActivityModel(species, parts.electrolytes, at)),
       debyeHueckelSlope,
     },
   )
   if (compiled.status !== 'compiled') return compiled
   return {
     speciation: compiled,
-    activity: compileActivityModel(compiled.species, parts.electrolytes, celsius),
+    activity: activity ?? compileActivityModel(compiled.species, parts.electrolytes, celsius),
     slope: debyeHueckelSlope(celsius),
     ties: tiesOf(compiled.species),
   }
+}
+
+/* One list for each set of data: what is made of it is kept with it. */
+const lists = new WeakMap<SystemParts['species'], readonly SpeciesRecord[]>()
+
+function speciesOf({ species }: SystemParts): readonly SpeciesRecord[] {
+  const known = lists.get(species)
+  if (known) return known
+  const made = [...species.values()]
+  lists.set(species, made)
+  return made
 }
