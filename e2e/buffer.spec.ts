@@ -66,6 +66,7 @@ test('a published vehicle is added with its source', async ({ page }) => {
   await openBuffers(sheet)
   const vehicles = page.getByRole('region', { name: 'Start from a published buffer' })
   await expect(vehicles.getByText(/Published pH .* at .* °C/)).toBeVisible()
+  await expect(vehicles.getByText(/The model gives pH 5\.8\d? there/)).toBeVisible()
   await vehicles.getByRole('button', { name: 'Add it to the formula' }).click()
   await expect(sheet.lines).toHaveCount(4)
 })

@@ -35,11 +35,16 @@ test('forms, certificate, stock and an ingredient of one’s own come through re
   await sheet.amount(3).press('Enter')
   await expect(sheet.running).toContainText('mOsm/kg')
   const before = await sheet.running.textContent()
+  const paper = async (of: SheetPage) => (await of.page.locator('.paper-sheet').allTextContents()).join('\n')
+  const sheetBefore = await paper(sheet)
+  expect(sheetBefore).toContain('entered by hand, not from the library')
+  expect(sheetBefore).toContain('lot holds 99 %')
 
   await page.waitForTimeout(700)
   await page.reload()
   await expect(sheet.lines).toHaveCount(3)
   await expect(sheet.running).toHaveText(before ?? '')
+  expect(await paper(sheet)).toBe(sheetBefore)
 
   const [download] = await Promise.all([
     page.waitForEvent('download'),
@@ -52,7 +57,17 @@ test('forms, certificate, stock and an ingredient of one’s own come through re
   await fresh.openFile('formula.json', text)
   await expect(fresh.lines).toHaveCount(3)
   await expect(fresh.running).toHaveText(before ?? '')
+  expect(await paper(fresh)).toBe(sheetBefore)
   await other.close()
+})
+
+test('what was added last is offered by the arrow in the empty row', async ({ page }) => {
+  const sheet = new SheetPage(page)
+  await sheet.open()
+  await sheet.addLine('mannitol', '1 %')
+  await sheet.addRow.focus()
+  await page.keyboard.press('ArrowDown')
+  await expect(sheet.candidates.first()).toContainText('Mannitol')
 })
 
 test('a vehicle fills up, and a percentage of a solution is refused with the way to write it', async ({

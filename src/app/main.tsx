@@ -2,7 +2,6 @@ import { StrictMode } from 'react'
 import { createRoot } from 'react-dom/client'
 import './style/tokens.css'
 import './style/base.css'
-import { startsNewerBuild } from './offline/browser.ts'
 import { Page } from './page/Page.tsx'
 import { PageProvider } from './state/context.tsx'
 import type { Page as PageTools } from './state/store.ts'
@@ -26,11 +25,9 @@ function tellFailure(element: HTMLElement, error: unknown) {
   element.textContent = `Evenwater could not start and shows nothing rather than something wrong. ${reason}`
 }
 
-async function start(element: HTMLElement) {
-  const isLoadingAgain = await startsNewerBuild().catch(() => false)
-  if (!isLoadingAgain) show(element, await startPage())
-}
-
 if (mount) {
-  start(mount).catch((error: unknown) => tellFailure(mount, error))
+  startPage().then(
+    (page) => show(mount, page),
+    (error: unknown) => tellFailure(mount, error),
+  )
 }

@@ -1,6 +1,7 @@
 import { lazy, Suspense, useState } from 'react'
 import '../common/tables.css'
 import './buffer.css'
+import './printed.css'
 
 const BufferPanel = lazy(() => import('./BufferPanel.tsx'))
 
@@ -8,7 +9,7 @@ const BufferPanel = lazy(() => import('./BufferPanel.tsx'))
 export function BufferSection() {
   const [open, setOpen] = useState(false)
   return (
-    <section className="section no-print" aria-labelledby="buffer">
+    <section className="section buffer-section" aria-labelledby="buffer">
       <details onToggle={(event) => setOpen(event.currentTarget.open)}>
         <summary>
           <h2 id="buffer" className="summary-heading">

@@ -30,7 +30,9 @@ export function VehiclePart() {
           </li>
         ))}
       </ul>
-      <p className="small">{view.source}</p>
+      <p className="small">
+        {view.source} {view.modelled}
+      </p>
       {view.note !== '' && <p className="small soft">{view.note}</p>}
       <button type="button" className="plain-button" onClick={() => putLines(withVehicle(formula, vehicle))}>
         Add it to the formula

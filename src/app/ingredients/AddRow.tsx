@@ -1,4 +1,5 @@
-import { usePageActions, useSearch } from '../state/context.tsx'
+import { usePage, usePageActions, useSearch } from '../state/context.tsx'
+import { recentCandidates } from '../state/search.ts'
 import { IngredientSearch } from './IngredientSearch.tsx'
 
 interface Props {
@@ -10,6 +11,9 @@ interface Props {
 export function AddRow({ row, onAdded }: Props) {
   const actions = usePageActions()
   const find = useSearch()
+  const library = usePage((state) => state.library)
+  const own = usePage((state) => state.own)
+  const recent = () => recentCandidates(library, own)
   return (
     <tr role="row" className="add-row no-print">
       <td role="cell" colSpan={8} className="ingredient-cell">
@@ -24,7 +28,9 @@ export function AddRow({ row, onAdded }: Props) {
             empty="add an ingredient"
             invalid={false}
             find={find}
+            recent={recent}
             onChoose={(candidate) => {
+              actions.noteUse(candidate.id)
               if (candidate.stock) actions.addStockLine(candidate.stock)
               else actions.addLine(candidate.record ?? candidate.id)
               onAdded(row)

@@ -12,15 +12,16 @@ interface Props {
   readonly invalid: boolean
   readonly find: (text: string) => readonly Candidate[]
   readonly onChoose: (candidate: Candidate) => void
+  readonly recent?: () => readonly Candidate[]
   /** Text that was typed and left without choosing. */
   readonly onLeave: (text: string) => void
 }
 
 /** The ingredient cell: a text field that offers the library's names, synonyms and near misses. */
 export function IngredientSearch(props: Props) {
-  const { label, row, value, empty, describedBy, invalid, find, onChoose, onLeave } = props
+  const { label, row, value, empty, describedBy, invalid, find, onChoose, onLeave, recent } = props
   const listId = useId()
-  const box = useCombobox({ find, onChoose })
+  const box = useCombobox({ find, onChoose, recent })
   const { typed, candidates, active, open } = box
   const keys = (event: KeyboardEvent) => {
     if (box.onKey(event)) {

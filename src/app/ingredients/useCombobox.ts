@@ -4,16 +4,19 @@ interface Options<T> {
   readonly find: (text: string) => readonly T[]
   /** Enter on the highlighted candidate, or a click. */
   readonly onChoose: (candidate: T) => void
+  /** What the arrow down offers in an empty cell. */
+  readonly recent?: (() => readonly T[]) | undefined
 }
 
 /**
  * The typing state of one search cell. Closed: the cell shows what is chosen and its keys belong to the table.
  * Open: arrows walk the candidates, Enter takes the highlighted one, Escape drops the text.
  */
-export function useCombobox<T>({ find, onChoose }: Options<T>) {
+export function useCombobox<T>({ find, onChoose, recent }: Options<T>) {
   const [typed, setTyped] = useState<string | null>(null)
   const [active, setActive] = useState(0)
-  const candidates = typed === null || typed.trim() === '' ? [] : find(typed)
+  const offered = (text: string) => (text.trim() === '' ? (recent?.() ?? []) : find(text))
+  const candidates = typed === null ? [] : offered(typed)
   const open = candidates.length > 0
 
   const close = () => {
@@ -29,6 +32,10 @@ export function useCombobox<T>({ find, onChoose }: Options<T>) {
     if (event.altKey || event.ctrlKey || event.metaKey) return false
     if (event.key === 'Escape' && typed !== null) {
       close()
+      return true
+    }
+    if (!open && typed === null && event.key === 'ArrowDown' && recent && recent().length > 0) {
+      setTyped('')
       return true
     }
     if (!open) return false

@@ -5,8 +5,7 @@ export function NewVersion() {
   const waits = usePage((state) => state.offline.newVersionWaits)
   return (
     <p className="small soft no-print" role="status">
-      {waits &&
-        'A new version is ready; it starts when you reload, once no other window of this page is open.'}
+      {waits && 'A new version is ready; it starts when you reload.'}
     </p>
   )
 }

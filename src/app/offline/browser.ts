@@ -27,28 +27,3 @@ async function lookForNewer(serviceWorker: ServiceWorkerContainer): Promise<void
     // offline
   }
 }
-
-const longestHandoverMs = 10_000
-
-/**
- * Before anything can be typed: lets a newer build that waits start, and loads it. True while that load is under way.
- * If another window is open, or it does not start in time, the page goes on as it is.
- */
-export async function startsNewerBuild(): Promise<boolean> {
-  if (!isServed() || !('serviceWorker' in navigator) || !navigator.serviceWorker.controller) return false
-  const { serviceWorker } = navigator
-  const waiting = (await serviceWorker.getRegistration())?.waiting
-  if (!waiting) return false
-  const hasStarted = await new Promise<boolean>((resolve) => {
-    serviceWorker.addEventListener('controllerchange', () => resolve(true), { once: true })
-    serviceWorker.addEventListener('message', ({ data }) => {
-      if (data === 'stays') resolve(false)
-    })
-    serviceWorker.startMessages()
-    setTimeout(() => resolve(false), longestHandoverMs)
-    // oxlint-disable-next-line unicorn/require-post-message-target-origin -- a worker has no other origin
-    waiting.postMessage('start')
-  })
-  if (hasStarted) window.location.reload()
-  return hasStarted
-}

@@ -32,7 +32,11 @@ export async function fill(
     }),
   )
   const cache = await caches.open(cacheOf(copy))
-  await Promise.all(fetched.map(({ address, response }) => cache.put(address, response)))
+  const isPage = ({ address }: { readonly address: string }) => address === scope
+  const put = ({ address, response }: (typeof fetched)[number]) => cache.put(address, response)
+  await Promise.all(fetched.filter((file) => !isPage(file)).map(put))
+  // The page last: a build whose page is there is there as a whole.
+  await Promise.all(fetched.filter(isPage).map(put))
 }
 
 async function markOf(content: ArrayBuffer): Promise<string> {
@@ -46,23 +50,21 @@ export async function dropOld(caches: CacheStorage, copy: PageCopy): Promise<voi
   await Promise.all(others.slice(0, -1).map((name) => caches.delete(name)))
 }
 
-/** A newer build may start when the window that is loading is the only one. */
-export const mayStart = (openWindows: number): boolean => openWindows < 2
-
-/** From this build's copy, then from an earlier one, then from the network; the page itself whatever its fragment. */
+/** From the newest build that holds it, then from an earlier one, then from the network; the page whatever its query. */
 export async function answerFrom(
   caches: CacheStorage,
-  copy: PageCopy,
   request: Request,
   scope: string,
   load: typeof fetch,
 ): Promise<Response> {
-  const address = new URL(request.url)
-  const wanted =
-    address.pathname === new URL('index.html', scope).pathname ? scope : address.origin + address.pathname
-  const options = { ignoreVary: true }
-  const cache = await caches.open(cacheOf(copy))
-  return (
-    (await cache.match(wanted, options)) ?? (await caches.match(wanted, options)) ?? (await load(request))
-  )
+  const { origin, pathname } = new URL(request.url)
+  const wanted = pathname === new URL('index.html', scope).pathname ? scope : origin + pathname
+  // In the order in which they were made.
+  const names = (await caches.keys()).filter((name) => name.startsWith(ours))
+  for (const name of names.toReversed()) {
+    const cache = await caches.open(name)
+    const found = await cache.match(wanted, { ignoreVary: true })
+    if (found) return found
+  }
+  return load(request)
 }

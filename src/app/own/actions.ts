@@ -1,16 +1,21 @@
 import type { Stock } from '../../library/stocks.ts'
 import type { Ingredient } from '../../library/types.ts'
 import type { PageStore } from '../state/store.ts'
-import { readOwn, type OwnContent, type OwnStore } from '../storage/ownShelf.ts'
+import { mostRecent, readOwn, type OwnContent, type OwnStore } from '../storage/ownShelf.ts'
 
 export interface OwnActions {
   keepOwnIngredient(ingredient: Ingredient): void
   keepOwnStock(stock: Stock): void
   dropOwn(id: string): void
+  /** What was just added stands first among the recent. */
+  noteUse(id: string): void
   /** The shelf of one's own as the text of a file. */
   exportOwn(): string
   importOwn(text: string): void
 }
+
+/** What a file holds: the shelf, not the habits. */
+const kept = ({ ingredients, stocks }: OwnContent) => ({ ingredients, stocks })
 
 const format = 'evenwater.own-shelf'
 
@@ -37,9 +42,16 @@ export function ownActions(page: PageStore, store: OwnStore): OwnActions {
     },
     dropOwn(id) {
       const { own } = page.getState()
-      change({ ingredients: without(own.ingredients, id), stocks: without(own.stocks, id) })
+      change({ ...own, ingredients: without(own.ingredients, id), stocks: without(own.stocks, id) })
     },
-    exportOwn: () => `${JSON.stringify({ format, version: 1, ...page.getState().own }, null, 2)}\n`,
+    noteUse(id) {
+      const { own } = page.getState()
+      const recent = [id, ...own.recent.filter((other) => other !== id)].slice(0, mostRecent)
+      page.setState({ own: { ...own, recent } })
+      // Losing the list of the recent costs nothing, so a refused write is not worth a notice.
+      store.write({ ...own, recent }).catch(() => undefined)
+    },
+    exportOwn: () => `${JSON.stringify({ format, version: 1, ...kept(page.getState().own) }, null, 2)}\n`,
     importOwn(text) {
       page.setState({ notice: taken(text, page, change) })
     },
@@ -60,6 +72,7 @@ function taken(text: string, page: PageStore, change: (own: OwnContent) => void)
   const { own } = page.getState()
   const incoming = new Set([...content.ingredients, ...content.stocks].map(({ id }) => id))
   change({
+    ...own,
     ingredients: [...own.ingredients.filter(({ id }) => !incoming.has(id)), ...content.ingredients],
     stocks: [...own.stocks.filter(({ id }) => !incoming.has(id)), ...content.stocks],
   })

@@ -40,6 +40,29 @@ export const searchIn =
       .map(({ candidate }) => candidate)
   }
 
+/** What was added last, the latest first; what is known no more is left out. */
+export function recentCandidates(
+  library: Library,
+  own: Own & { readonly recent: readonly string[] },
+): readonly Candidate[] {
+  const solutions = [...own.stocks, ...library.stocks.values()]
+  const shapes = asIngredients(solutions)
+  const matchOf = (ingredient: Ingredient): IngredientMatch => ({
+    ingredient,
+    matched: ingredient.name,
+    by: 'name',
+    score: 1,
+  })
+  return own.recent.flatMap((id) => {
+    const known = library.ingredients.get(id)
+    if (known) return [candidateOf(matchOf(known))]
+    const record = own.ingredients.find((ingredient) => ingredient.id === id)
+    if (record) return [{ ...candidateOf(matchOf(record)), record }]
+    const solution = shapes.get(id)
+    return solution ? [solutionCandidate(matchOf(solution), solutions, library)] : []
+  })
+}
+
 /** What a person has on a shelf of one's own. */
 export interface Own {
   readonly ingredients: readonly Ingredient[]

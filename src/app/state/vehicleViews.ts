@@ -1,3 +1,4 @@
+import { pHAlone } from '../../evaluation/buffers/acidity.ts'
 import type { Formula } from '../../formula/types.ts'
 import type { Library } from '../../library/library.ts'
 import type { PublishedVehicle } from '../../library/vehicles.ts'
@@ -8,6 +9,8 @@ export interface VehicleView {
   readonly words: string
   readonly parts: readonly { readonly name: string; readonly strength: string }[]
   readonly source: string
+  /** What the model makes of it. */
+  readonly modelled: string
   readonly note: string
 }
 
@@ -23,8 +26,19 @@ export function vehicleView(vehicle: PublishedVehicle, library: Library): Vehicl
       strength: `${significant(grams, 4)} g/L`,
     })),
     source: `Published pH ${decimals(pH.value, 2)} at ${celsius} °C: ${library.sources.get(pH.source)?.title ?? pH.source}${memory}.`,
+    modelled: modelledPH(vehicle, library),
     note: [note, pH.note].filter((text) => text !== undefined).join(' '),
   }
+}
+
+/** The pH by the balance of charges at the temperature of the published one. */
+function modelledPH({ gramsPerLitre, celsius }: PublishedVehicle, library: Library): string {
+  const portions = gramsPerLitre.flatMap(({ ingredient: id, grams }) => {
+    const ingredient = library.ingredients.get(id)
+    return ingredient ? [{ key: id, ingredient, grams }] : []
+  })
+  const pH = pHAlone(portions, celsius, library)
+  return pH === null ? 'The model has no pH for it.' : `The model gives pH ${decimals(pH, 2)} there.`
 }
 
 /** The lines of a vehicle added to a formula; the pH is left to the model. */

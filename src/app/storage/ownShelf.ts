@@ -8,9 +8,11 @@ import type { Ingredient } from '../../library/types.ts'
 export interface OwnContent {
   readonly ingredients: readonly Ingredient[]
   readonly stocks: readonly Stock[]
+  /** Ids of what was added last, the latest first. */
+  readonly recent: readonly string[]
 }
 
-export const emptyOwn: OwnContent = { ingredients: [], stocks: [] }
+export const emptyOwn: OwnContent = { ingredients: [], stocks: [], recent: [] }
 
 export interface OwnStore {
   read(): Promise<OwnContent>
@@ -18,6 +20,7 @@ export interface OwnStore {
 }
 
 const key = 'own'
+export const mostRecent = 12
 
 export function browserOwn(): OwnStore {
   let store: UseStore | undefined
@@ -32,15 +35,19 @@ const asList = (value: unknown): readonly unknown[] => (Array.isArray(value) ? v
 
 /** What a file or the browser holds, record by record; those that cannot be read are counted, not guessed. */
 export function readOwn(value: unknown): { readonly content: OwnContent; readonly unreadable: number } {
-  const { ingredients, stocks } = (typeof value === 'object' && value !== null ? value : {}) as {
+  const { ingredients, stocks, recent } = (typeof value === 'object' && value !== null ? value : {}) as {
     readonly ingredients?: unknown
     readonly stocks?: unknown
+    readonly recent?: unknown
   }
   const read = asList(ingredients).map(readIngredient)
   const solutions = asList(stocks).map((stock) => v.safeParse(stockSchema, stock))
   const content = {
     ingredients: read.flatMap((result) => (result.ok ? [result.value] : [])),
     stocks: solutions.flatMap((result) => (result.success ? [result.output] : [])),
+    recent: asList(recent)
+      .filter((id) => typeof id === 'string')
+      .slice(0, mostRecent),
   }
   const all = read.length + solutions.length
   return { content, unreadable: all - content.ingredients.length - content.stocks.length }

@@ -14,11 +14,15 @@ export function neutralCurve({ freezing, at25 }: NeutralCurve, celsius: number):
     out[0] = m * (1 + m * (a + m * (b + m * c)))
     out[1] = 1 + m * (2 * a + m * (3 * b + m * 4 * c))
   }
+  // Of osmolalities asked for one after another each is near the last.
+  let ratio = 1
   return {
     osmolalityAt,
     molalityAt(osmolality) {
       if (osmolality <= 0) return 0
-      return invertQuickly(osmolality, osmolality, withSlope) ?? invert(osmolality, osmolality, osmolalityAt)
+      const found = invertQuickly(osmolality, osmolality * ratio, withSlope)
+      if (found !== null) ratio = found / osmolality
+      return found ?? invert(osmolality, osmolality, osmolalityAt)
     },
   }
 }

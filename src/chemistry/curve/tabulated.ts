@@ -130,12 +130,15 @@ export function curveOf(table: TabulatedCurve, slope: number): OsmoticCurve {
     out[1] = (count + growthAt(table, m)) * coefficient + count * limitingGrowth(m, shape, slope)
   }
   const typical = table.points[0]?.count ?? 1
+  // Of osmolalities asked for one after another each is near the last.
+  let ratio = 1 / typical
   return {
     osmolalityAt,
     molalityAt(osmolality) {
       if (osmolality <= 0) return 0
-      const start = osmolality / typical
-      return invertQuickly(osmolality, start, withSlope) ?? invert(osmolality, start, osmolalityAt)
+      const found = invertQuickly(osmolality, osmolality * ratio, withSlope)
+      if (found !== null) ratio = found / osmolality
+      return found ?? invert(osmolality, osmolality / typical, osmolalityAt)
     },
   }
 }

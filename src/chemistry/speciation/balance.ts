@@ -1,4 +1,4 @@
-import { carryOn, ClusterWork, solveCluster, startCluster } from './cluster.ts'
+import { ClusterWork, solveCluster, startCluster } from './cluster.ts'
 import { FixedPoint } from './fixed-point.ts'
 import type { Layout } from './layout.ts'
 
@@ -157,8 +157,6 @@ export function balanceAt(
   for (const family of layout.families) solveFamily(layout, work, family)
   for (const part of work.clusters) {
     if (isFirst) startCluster(part, work.weights)
-    else carryOn(part, lnHydrogen)
-    part.lnHydrogen = lnHydrogen
     if (!solveCluster(part, work.weights, layout.protons, work.molalities, tolerance)) return false
     clusterSlopes(layout, work, part)
   }

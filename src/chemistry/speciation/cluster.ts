@@ -15,10 +15,8 @@ export class ClusterWork {
   /** Second derivatives, then their factor. */
   readonly matrix: Float64Array
   readonly step: Float64Array
-  /** Change of ln(free) with ln(H+), sign reversed, at the last solve. */
+  /** Change of ln(free) with ln(H+), sign reversed. */
   readonly response: Float64Array
-  /** ln a(H+) of the last solve. */
-  lnHydrogen = 0
   readonly totals: Float64Array
   readonly cluster: Cluster
 
@@ -243,18 +241,6 @@ export function startCluster(work: ClusterWork, weights: Float64Array): void {
   }
   for (let c = 0; c < work.free.length; c++) {
     work.free[c] = (work.totals[c] as number) / (work.sums[c] as number)
-  }
-}
-
-/* Farther than this, in ln a(H+), a straight line says nothing. */
-const farthest = 1
-
-/** Start from the last solve, carried on to another ln a(H+) along its response. */
-export function carryOn(work: ClusterWork, lnHydrogen: number): void {
-  const change = lnHydrogen - work.lnHydrogen
-  if (change === 0 || Math.abs(change) > farthest) return
-  for (let c = 0; c < work.free.length; c++) {
-    work.free[c] = (work.free[c] as number) * Math.exp(-(work.response[c] as number) * change)
   }
 }
 

@@ -1,6 +1,6 @@
 import { loadEstimates } from '../../library/estimates.ts'
 import { waterDensity } from '../activity/debye-hueckel.ts'
-import type { SpeciesRecord } from '../../library/types.ts'
+import type { Ingredient, SpeciesRecord } from '../../library/types.ts'
 import type { ChemistryProblem, Composition, Dissolved } from '../types.ts'
 import { partialVolume, specificVolume, volumeGrowth, waterMolarMass, waterOf } from './volume.ts'
 
@@ -36,7 +36,7 @@ export function waterIn(
   composition: Composition,
   species: ReadonlyMap<string, SpeciesRecord>,
 ): Water | ChemistryProblem {
-  const occupied = composition.dissolved.map((item) => occupiedBy(item, species))
+  const occupied = composition.dissolved.map(({ ingredient }) => occupiedBy(ingredient, species))
   let growth = 0
   let answer = balance(composition, occupied, growth)
   // The growth of volumes with ionic strength needs the water, which needs the growth: two rounds settle it.
@@ -51,7 +51,24 @@ export function waterIn(
   return describe(composition, occupied, answer)
 }
 
-function occupiedBy({ ingredient }: Dissolved, species: ReadonlyMap<string, SpeciesRecord>): Occupied {
+/* It follows from the two alone, and is asked for at every keystroke. */
+const spaces = new WeakMap<ReadonlyMap<string, SpeciesRecord>, WeakMap<Ingredient, Occupied>>()
+
+function occupiedBy(ingredient: Ingredient, species: ReadonlyMap<string, SpeciesRecord>): Occupied {
+  let known = spaces.get(species)
+  if (!known) {
+    known = new WeakMap()
+    spaces.set(species, known)
+  }
+  let space = known.get(ingredient)
+  if (!space) {
+    space = spaceOf(ingredient, species)
+    known.set(ingredient, space)
+  }
+  return space
+}
+
+function spaceOf(ingredient: Ingredient, species: ReadonlyMap<string, SpeciesRecord>): Occupied {
   const molarMass = ingredient.molarMass?.value
   const partial = partialVolume(ingredient, species)
   if (partial && molarMass !== undefined) {
@@ -83,12 +100,13 @@ function amountOf({ amount, ingredient }: Dissolved, waterKg: number): number {
   return ingredient.molarMass ? amount.g / ingredient.molarMass.value : amount.g
 }
 
+const kgPerLitre = waterDensity(volumeCelsius) / 1000
+
 function balance(
   composition: Composition,
   occupied: readonly Occupied[],
   growth: number,
 ): { waterKg: number } | null {
-  const kgPerLitre = waterDensity(volumeCelsius) / 1000
   let fixedLitres = 0
   let litresPerKg = 1 / kgPerLitre
   let crystalKg = 0

@@ -105,6 +105,12 @@ export function pHDiluted(
   return readyAt(diluted, setting, setting.temperatureCelsius, library)?.answer.pH ?? null
 }
 
+/** pH of a litre that holds the given masses and nothing else; null where it cannot be known. */
+export function pHAlone(portions: readonly Portion[], celsius: number, library: Library): number | null {
+  const setting = { volumeMl: 1000, pH: 'solve', temperatureCelsius: celsius } as const
+  return readyAt(portions, setting, celsius, library)?.answer.pH ?? null
+}
+
 function openToAir(
   portions: readonly Portion[],
   setting: Setting,

@@ -18,6 +18,7 @@ import { named } from './words.ts'
 
 /** What a trigger tree comes to in a context: pure, and `unknown` where it hangs on what is not known. */
 export function judge(condition: Condition, context: CautionContext): Outcome {
+  if ('line' in condition) return ofLines(condition, context)
   if ('all' in condition) return everyPart(condition.all, context)
   if ('any' in condition) return anyOf(condition.any.map((part) => judge(part, context)))
   if ('not' in condition) return notOf(judge(condition.not, context))
@@ -27,7 +28,12 @@ export function judge(condition: Condition, context: CautionContext): Outcome {
   if ('together' in condition) return together(condition, context)
   if ('ion' in condition) return ionAmount(condition, context)
   if ('measure' in condition) return measured(condition, context)
-  if ('beyond' in condition) return beyondRoute(condition, context)
+  return beyondRoute(condition, context)
+}
+
+/** Most rules begin with the lines that they are about, and most formulas have none of them. */
+function ofLines(condition: Case<'line'>, context: CautionContext): Outcome {
+  if (!context.lines.some(({ ingredient }) => isSelected(ingredient, condition.line))) return outcome(false)
   if ('pHMinusPKa' in condition) return pHAgainstPKa(condition, context)
   if ('usual' in condition) return againstUsual(condition, context)
   if ('orderedIn' in condition) return lineOrderedIn(condition, context)
@@ -58,8 +64,10 @@ function everyLine({ everyLine: selector }: Case<'everyLine'>, { lines }: Cautio
 
 /** Two different ingredients, one of each kind: whatever is of both kinds needs a partner. */
 function together({ together: [first, second] }: Case<'together'>, { lines }: CautionContext): Outcome {
+  const ones = selected(lines, first)
+  if (ones.length === 0) return outcome(false)
   const others = selected(lines, second)
-  const meeting = selected(lines, first).filter(({ ingredient }) =>
+  const meeting = ones.filter(({ ingredient }) =>
     others.some((other) => other.ingredient.id !== ingredient.id),
   )
   const met = others.filter(({ ingredient }) =>
