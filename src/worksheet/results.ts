@@ -1,5 +1,6 @@
+import { readVolume } from '../quantity/readMeasure.ts'
 import { field, fields, wide } from './sections.ts'
-import { decimalText, numberText, percentText, wholeText } from './say.ts'
+import { decimalText, numberText, percentText, volumeText, wholeText } from './say.ts'
 import type { Evaluation, SolutionAnswer } from '../evaluation/types.ts'
 import type { SheetField, SheetSection } from './types.ts'
 
@@ -81,6 +82,7 @@ function other(solution: SolutionAnswer): readonly SheetField[] {
 export function electrolyteSection(evaluation: Evaluation): SheetSection | null {
   const volume = evaluation.volumeMl
   if (evaluation.electrolytes.length === 0 || volume === null) return null
+  const doseMl = doseOf(evaluation)
   return {
     kind: 'table',
     heading: 'Electrolytes',
@@ -90,6 +92,12 @@ export function electrolyteSection(evaluation: Evaluation): SheetSection | null 
       { label: 'mEq per mL', align: 'end' },
       { label: 'mmol per container', align: 'end' },
       { label: 'mEq per container', align: 'end' },
+      ...(doseMl === null
+        ? []
+        : ([
+            { label: `mmol per dose of ${volumeText(doseMl)}`, align: 'end' },
+            { label: 'mEq per dose', align: 'end' },
+          ] as const)),
     ],
     rows: evaluation.electrolytes.map(({ ion, mmolPerMl, mEqPerMl }) => [
       { text: ion },
@@ -97,8 +105,20 @@ export function electrolyteSection(evaluation: Evaluation): SheetSection | null 
       { text: mEqPerMl === null ? 'count in mmol' : numberText(mEqPerMl, 3) },
       { text: numberText(mmolPerMl * volume, 3) },
       { text: mEqPerMl === null ? 'count in mmol' : numberText(mEqPerMl * volume, 3) },
+      ...(doseMl === null
+        ? []
+        : [
+            { text: numberText(mmolPerMl * doseMl, 3) },
+            { text: mEqPerMl === null ? 'count in mmol' : numberText(mEqPerMl * doseMl, 3) },
+          ]),
     ]),
   }
+}
+
+/** Volume of one dose, mL, where the order tells it. */
+function doseOf({ formula }: Evaluation): number | null {
+  const read = formula.patient?.doseVolume === undefined ? null : readVolume(formula.patient.doseVolume)
+  return read?.ok ? read.value : null
 }
 
 /** Who supplies the particles, and what of it cells can hold. */

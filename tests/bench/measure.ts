@@ -54,7 +54,7 @@ function formulaOf(count: number, turn: number, adjusted = false): Formula {
   }
 }
 
-const rounds = 300
+const rounds = 800
 
 interface Time {
   readonly least: number
@@ -62,7 +62,7 @@ interface Time {
 }
 
 /**
- * Microseconds of a call over rounds of at least 2 ms, after warm-up: the median, and the least, which other work on the
+ * Microseconds of a call over rounds of at least 0.5 ms, after warm-up: the median, and the least, which other work on the
  * machine disturbs least.
  */
 function microseconds(call: (turn: number) => unknown): Time {
@@ -76,7 +76,7 @@ function microseconds(call: (turn: number) => unknown): Time {
     do {
       call((turn += 1))
       calls += 1
-    } while (performance.now() - start < 2)
+    } while (performance.now() - start < 0.5)
     times.push(((performance.now() - start) * 1000) / calls)
   }
   const sorted = times.toSorted((a, b) => a - b)
