@@ -1,13 +1,6 @@
 import type { Read } from './amount.ts'
 import type { Locale } from './locale.ts'
-import {
-  multiply,
-  powerOfTen,
-  rationalOfNumber,
-  roundedDecimal,
-  roundedToPlace,
-  toNumber,
-} from './rational.ts'
+import { roundedDecimal, roundedToPlace, shifted } from './rational.ts'
 import { accept, refuse } from './refusal.ts'
 
 /** How many digits are shown. Neither: twelve significant digits, enough to hide binary noise only. */
@@ -94,9 +87,6 @@ const massUnits: readonly (readonly [string, number])[] = [
   ['mcg', 6],
 ]
 
-const scaled = (value: number, power: number) =>
-  toNumber(multiply(rationalOfNumber(value), powerOfTen(power)))
-
 /**
  * A mass in the unit a person reads it in: g from 1 g up, mg from 1 mg up, mcg below. The unit is chosen after
  * rounding, so that 999.96 mg to four digits is 1 g. `decimals` count in the unit that is shown.
@@ -106,11 +96,11 @@ export function expressMass(grams: number | null | undefined, format: NumberForm
   if (grams === null || grams === undefined || !Number.isFinite(grams)) return notKnown
   const significant = format.significant ?? usualSignificant
   const [unit, power] = massUnits.find(([, power]) => {
-    const inUnit = scaled(grams, power)
+    const inUnit = shifted(grams, power)
     const shown = roundedToPlace(inUnit, placeOf(inUnit, { significant }))
     return grams === 0 || Math.abs(shown) >= 1
   }) ?? ['mcg', 6]
-  return expressQuantity(scaled(grams, power), unit, format)
+  return expressQuantity(shifted(grams, power), unit, format)
 }
 
 /**

@@ -117,6 +117,15 @@ export function roundedDecimal(value: number, place: number): string {
   return terminatingDecimal(roundToStep(rationalOfNumber(value), powerOfTen(place))) ?? ''
 }
 
+/**
+ * A finite number times a power of ten, moved digit by digit: what the exact product rounds to.
+ * @example shifted(0.07, 3) → 70
+ */
+export function shifted(value: number, power: number): number {
+  const [mantissa = '', exponentText = '0'] = String(value).split('e')
+  return Number(`${mantissa}e${Number(exponentText) + power}`)
+}
+
 /** So many digits make a whole number that a double holds. */
 const safeDigits = 15
 const largestQuick = 1e300

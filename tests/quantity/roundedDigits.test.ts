@@ -1,12 +1,14 @@
 import * as fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import {
+  multiply,
   powerOfTen,
   rationalOfNumber,
   roundedDecimal,
   roundedToDigits,
   roundedToPlace,
   roundToStep,
+  shifted,
   terminatingDecimal,
   toNumber,
 } from '../../src/quantity/rational.ts'
@@ -42,6 +44,18 @@ describe('rounding by digits', () => {
       }),
       { numRuns: 4000 },
     )
+  })
+
+  it('moves the point as the exact product does', () => {
+    fc.assert(
+      fc.property(numbers, fc.integer({ min: -12, max: 12 }), (value, power) => {
+        fc.pre(value !== 0)
+        const product = multiply(rationalOfNumber(value), powerOfTen(power))
+        expect(shifted(value, power)).toBe(toNumber(product))
+      }),
+      { numRuns: 4000 },
+    )
+    expect(shifted(0.07, 3)).toBe(70)
   })
 
   it('worked: 2.675 to two decimals, 0.0123456 to three digits, 1234.5 whole', () => {
