@@ -36,15 +36,15 @@ test('forms, certificate, stock and an ingredient of one’s own come through re
   await expect(sheet.running).toContainText('mOsm/kg')
   const before = await sheet.running.textContent()
   const paper = async (of: SheetPage) => (await of.page.locator('.paper-sheet').allTextContents()).join('\n')
+  await expect.poll(() => paper(sheet)).toContain('entered by hand, not from the library')
   const sheetBefore = await paper(sheet)
-  expect(sheetBefore).toContain('entered by hand, not from the library')
   expect(sheetBefore).toContain('lot holds 99 %')
 
   await page.waitForTimeout(700)
   await page.reload()
   await expect(sheet.lines).toHaveCount(3)
   await expect(sheet.running).toHaveText(before ?? '')
-  expect(await paper(sheet)).toBe(sheetBefore)
+  await expect.poll(() => paper(sheet)).toBe(sheetBefore)
 
   const [download] = await Promise.all([
     page.waitForEvent('download'),
@@ -57,7 +57,7 @@ test('forms, certificate, stock and an ingredient of one’s own come through re
   await fresh.openFile('formula.json', text)
   await expect(fresh.lines).toHaveCount(3)
   await expect(fresh.running).toHaveText(before ?? '')
-  expect(await paper(fresh)).toBe(sheetBefore)
+  await expect.poll(() => paper(fresh)).toBe(sheetBefore)
   await other.close()
 })
 

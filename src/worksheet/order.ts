@@ -7,7 +7,8 @@ import { field, fields, wide } from './sections.ts'
 import { strengthsText } from './strength.ts'
 import type { SheetField, SheetSection } from './types.ts'
 
-export const vehicleOf = ({ formula }: Evaluation): string => formula.vehicle ?? 'water for injection'
+export const vehicleOf = ({ formula, lines }: Evaluation): string =>
+  lines.find(({ stock }) => stock?.fills)?.stock?.stock.name ?? formula.vehicle ?? 'water for injection'
 
 /** What the preparation is, in either record. */
 export function identityFields(evaluation: Evaluation): readonly SheetField[] {

@@ -2,6 +2,7 @@ import type { Library } from '../library/library.ts'
 import type { Ingredient } from '../library/types.ts'
 import type { StepRule } from '../library/steps.ts'
 import type { Evaluation, LineAnswer } from '../evaluation/types.ts'
+import { groupLines } from '../evaluation/stocks/group.ts'
 import { nameOf } from './names.ts'
 import { vehicleOf } from './order.ts'
 import { sterileRoutes } from './routes.ts'
@@ -71,13 +72,25 @@ export function stepSection(evaluation: Evaluation, library: Library, ticked: bo
     heading: 'Steps',
     ticked,
     steps: mixingSteps(library.steps, {
-      lines: evaluation.lines,
+      lines: stepLines(evaluation, library.steps),
       vehicle: vehicleOf(evaluation),
       volume: volume === null ? 'the final volume' : volumeText(volume),
       sterile: sterileRoutes.has(evaluation.formula.route),
-      nameOf: (line) => nameOf(line) + wayOf(line, evaluation, ticked),
+      nameOf: (line) => (line.stock?.stock.name ?? nameOf(line)) + wayOf(line, evaluation, ticked),
     }),
   }
+}
+
+/** A solution from the shelf goes in at once, where the latest of its ingredients belongs; a filling vehicle is none. */
+function stepLines({ lines }: Evaluation, rules: readonly StepRule[]): readonly LineAnswer[] {
+  const placeOf = ({ ingredient }: LineAnswer) => {
+    const rule = ruleFor(rules, ingredient)
+    return rule ? rules.indexOf(rule) : -1
+  }
+  return groupLines(lines).flatMap((group) => {
+    if (!group.stock) return group.lines
+    return group.stock.fills ? [] : group.lines.toSorted((a, b) => placeOf(b) - placeOf(a)).slice(0, 1)
+  })
 }
 
 /** In a batch a substance comes as it was measured. */
